@@ -1,0 +1,2 @@
+export * from './actor';
+export * from './permissions';

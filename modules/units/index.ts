@@ -1,0 +1,7 @@
+export * from './clock-time';
+export * from './dates';
+export * from './errors';
+export type * from './ids';
+export * from './money';
+export * from './result';
+export * from './zones';

@@ -1,0 +1,7 @@
+/** @type {import('next').NextConfig} */
+const config = {
+  /** Native and WASM packages stay outside the bundle; highs finds its .wasm beside its own file. */
+  serverExternalPackages: ['highs', 'piscina', 'better-sqlite3', '@node-rs/argon2', 'smtp-server'],
+  poweredByHeader: false,
+};
+export default config;
