@@ -27,7 +27,7 @@ export function db(): Db {
 }
 
 /** Puts another connection in place; tests give each file its own database. */
-export function useDb(replacement: Db): void {
+export function replaceDb(replacement: Db): void {
   shared.floorwrightDb = replacement;
 }
 

@@ -41,3 +41,12 @@ export function weekdayOf(date: LocalDate): number {
 
 /** The Monday of the date's ISO week. */
 export const mondayOf = (date: LocalDate): LocalDate => addDays(date, -weekdayOf(date));
+
+const weekdayNames = ['Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat', 'Sun'];
+const monthNames = 'Jan Feb Mar Apr May Jun Jul Aug Sep Oct Nov Dec'.split(' ');
+
+/** A date for people without its year. `formatDay('2027-02-11')` is `Thu 11 Feb`. */
+export function formatDay(date: LocalDate): string {
+  const month = monthNames[Number(date.slice(5, 7)) - 1];
+  return `${weekdayNames[weekdayOf(date)]} ${Number(date.slice(8))} ${month}`;
+}

@@ -1,5 +1,3 @@
-import { randomBytes } from 'node:crypto';
-
 /** Two or three letters that say what an id names, so that a wrong id is seen in a log at a glance. */
 export type IdPrefix =
   | 'org'
@@ -39,7 +37,7 @@ export type RosterId = Id<'ros'>;
 export type VersionId = Id<'ver'>;
 export type RunId = Id<'run'>;
 
-/** Makes a new id of 120 random bits. The one place where ids come from. */
+/** Makes a new id of 128 random bits. The one place where ids come from. */
 export function newId<P extends IdPrefix>(prefix: P): Id<P> {
-  return `${prefix}_${randomBytes(15).toString('base64url')}`;
+  return `${prefix}_${crypto.randomUUID().replaceAll('-', '')}`;
 }

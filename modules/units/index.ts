@@ -1,6 +1,7 @@
 export * from './clock-time';
 export * from './dates';
 export * from './errors';
+export * from './id-schema';
 export type * from './ids';
 export * from './money';
 export * from './result';

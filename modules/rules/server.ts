@@ -1,0 +1,1 @@
+export { readPayRules, readRuleSet } from './store';
