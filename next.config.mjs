@@ -1,7 +1,17 @@
 /** @type {import('next').NextConfig} */
 const config = {
   /** Native and WASM packages stay outside the bundle; highs finds its .wasm beside its own file. */
-  serverExternalPackages: ['highs', 'piscina', 'better-sqlite3', '@node-rs/argon2', 'smtp-server'],
+  serverExternalPackages: [
+    'highs',
+    'piscina',
+    'better-sqlite3',
+    '@node-rs/argon2',
+    'smtp-server',
+    'nodemailer',
+    'mailparser',
+    'ical-generator',
+    'papaparse',
+  ],
   poweredByHeader: false,
 };
 export default config;

@@ -7,6 +7,7 @@ import {
   type SkillId,
   type TeamId,
 } from '../units';
+import { endMinuteSchema, startMinuteSchema } from './window';
 
 /** The columns of a weekly pattern: Monday 0 to Sunday 6, then 7 for public holidays. */
 export const patternDays = [0, 1, 2, 3, 4, 5, 6, 7] as const;
@@ -26,8 +27,8 @@ export const floorInputSchema = z
   .strictObject({
     /** null: anybody on duty counts. */
     skillId: z.string().nullable(),
-    startMinute: z.int().min(0).max(1439),
-    endMinute: z.int().min(1).max(2880),
+    startMinute: startMinuteSchema,
+    endMinute: endMinuteSchema,
     /** People needed for Monday to Sunday and holidays: eight numbers. */
     needs: z.array(peopleSchema).length(8, 'Give eight numbers: Monday to Sunday and holidays.'),
     counting: z.enum(['seated', 'shared']),

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import type { ShiftKindId, SkillId, TeamId } from '../units';
+import { endMinuteSchema, startMinuteSchema } from './window';
 
 /** What a user enters for one shift kind. Minutes are of the local day; an end beyond 1440 is past midnight. */
 export const shiftKindInputSchema = z
@@ -14,10 +15,10 @@ export const shiftKindInputSchema = z
       .trim()
       .min(1, 'Give one to three letters for the brick.')
       .max(3, 'Give one to three letters for the brick.'),
-    startMinute: z.int().min(0).max(1439),
-    endMinute: z.int().min(1).max(2880),
+    startMinute: startMinuteSchema,
+    endMinute: endMinuteSchema,
     unpaidBreakMinutes: z
-      .int()
+      .int('Write the break in whole minutes.')
       .min(0, 'A break cannot be negative.')
       .max(240, 'A break can be at most 240 minutes.'),
     isNight: z.boolean(),

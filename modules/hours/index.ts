@@ -1,1 +1,2 @@
+export { sumPerson } from './sum-person';
 export type * from './views';

@@ -1,3 +1,4 @@
+import type { PayRules } from '../rules';
 import type { LocalDate, PersonId } from '../units';
 
 /** Planned and worked minutes of one person on one local date, counted where the shift starts. */
@@ -31,12 +32,22 @@ export interface HoursPerson {
   readonly days: readonly HoursDay[];
 }
 
+export interface PublishedPeriod {
+  readonly startsOn: LocalDate;
+  readonly endsOn: LocalDate;
+}
+
 /** What HR sees of a date range: published rosters only. */
 export interface HoursView {
   readonly teamName: string;
   readonly from: LocalDate;
   readonly to: LocalDate;
   readonly today: LocalDate;
-  readonly periods: readonly { readonly startsOn: LocalDate; readonly endsOn: LocalDate }[];
+  /** Published periods that share a day with the range, earliest first. */
+  readonly periods: readonly PublishedPeriod[];
+  /** Every published period of the team, earliest first. */
+  readonly allPeriods: readonly PublishedPeriod[];
+  /** What night, weekend and holiday hours are and add. */
+  readonly payRules: PayRules;
   readonly people: readonly HoursPerson[];
 }

@@ -44,7 +44,10 @@ export const problemShiftSchema = z.strictObject({
   postSkillIds: z.array(z.string()).nullable(),
 });
 
-/** A floor on one day: least `people` on duty over [startMinute, endMinute). */
+/**
+ * A floor on one day: least `people` on duty over [startMinute, endMinute). On the first day: beyond
+ * those still on duty from the period before, so one floor may stand here in several pieces.
+ */
 export const problemFloorSchema = z.strictObject({
   floorId: z.string(),
   dayIndex,

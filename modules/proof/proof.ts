@@ -3,6 +3,7 @@ export interface ProvenShortage {
   /** Floors that ask for this cover; several when seated floors of one skill add up. */
   readonly floorIds: readonly string[];
   readonly skillId: string | null;
+  /** The day the floor belongs to: a window that runs past midnight stays with the day it starts on. */
   readonly date: string;
   /** On the problem's time axis, half-open. */
   readonly startMinute: number;

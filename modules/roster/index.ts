@@ -1,1 +1,3 @@
+export { axisMinutesOf, coverLanes, type Duty } from './cover-lanes';
+export * from './roster-input';
 export type * from './views';

@@ -24,8 +24,15 @@ export interface RosterSummary {
   readonly shiftCount: number;
   /** Missing person-minutes on firm floors, null when nothing is planned yet. */
   readonly shortageMinutes: number | null;
+  /** People with shifts in the newest published version and how many confirmed it; before: everybody, 0. */
   readonly confirmedCount: number;
   readonly peopleCount: number;
+}
+
+/** What publishing answers. */
+export interface PublishedRoster extends RosterSummary {
+  /** Sentences on what was published although it is not as promised, e.g. short notice. */
+  readonly warnings: readonly string[];
 }
 
 /** Need and cover over one stretch of time, half-open, on the axis of `Board.days`. */
@@ -118,6 +125,10 @@ export interface Board {
   readonly proof: Proof | null;
   readonly mayEdit: boolean;
   readonly maySeePay: boolean;
+  /** Set when publishing today gives people less notice than the team promises. */
+  readonly noticeWarning: string | null;
+  /** Sentences on people, kinds and pins that a run of this period has to leave out. */
+  readonly notes: readonly string[];
   readonly activeRunId: RunId | null;
   /** The run that made this version, with its proven bound. */
   readonly run: RunSummary | null;
@@ -219,6 +230,7 @@ export interface OwnShifts {
   readonly personName: string;
   readonly teamName: string;
   readonly zone: string;
+  readonly dayStartsAtMinute: number;
   readonly today: LocalDate;
   /** Minute of the local day now. */
   readonly nowMinute: number;
@@ -240,4 +252,19 @@ export interface CalendarEntry {
   readonly startsAtUtc: number;
   readonly endsAtUtc: number;
   readonly isPublished: boolean;
+}
+
+/** What a calendar page draws around the shifts of a team. */
+export interface CalendarFrame {
+  readonly zone: string;
+  readonly dayStartsAtMinute: number;
+  readonly today: LocalDate;
+  /** Minute of the local day now. */
+  readonly nowMinute: number;
+  readonly periods: readonly {
+    readonly startsOn: LocalDate;
+    readonly endsOn: LocalDate;
+    readonly isPublished: boolean;
+  }[];
+  readonly holidays: readonly { readonly date: LocalDate; readonly name: string }[];
 }

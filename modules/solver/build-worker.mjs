@@ -1,19 +1,17 @@
-import { existsSync } from 'node:fs';
+import { join } from 'node:path';
 import { build } from 'esbuild';
 
-const entry = 'modules/solver/worker.ts';
-
-/** Bundles the solver's worker thread to dist/workers/solver.mjs: the same file for start, dev and tests. */
+/** Bundles the body of the solver threads to dist/workers/solver.mjs; packages stay outside. */
 export async function buildWorker() {
-  if (!existsSync(entry)) return;
   await build({
-    entryPoints: [entry],
-    outfile: 'dist/workers/solver.mjs',
+    entryPoints: [join(import.meta.dirname, 'worker.ts')],
+    outfile: join(import.meta.dirname, '..', '..', 'dist', 'workers', 'solver.mjs'),
     bundle: true,
-    format: 'esm',
     platform: 'node',
+    format: 'esm',
     target: 'node20',
     packages: 'external',
+    sourcemap: 'inline',
     logLevel: 'warning',
   });
 }

@@ -42,7 +42,8 @@ export function weekdayOf(date: LocalDate): number {
 /** The Monday of the date's ISO week. */
 export const mondayOf = (date: LocalDate): LocalDate => addDays(date, -weekdayOf(date));
 
-const weekdayNames = ['Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat', 'Sun'];
+/** Short names of the weekdays, Monday first. */
+export const weekdayNames = ['Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat', 'Sun'];
 const monthNames = 'Jan Feb Mar Apr May Jun Jul Aug Sep Oct Nov Dec'.split(' ');
 
 /** A date for people without its year. `formatDay('2027-02-11')` is `Thu 11 Feb`. */

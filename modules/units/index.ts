@@ -1,4 +1,5 @@
 export * from './clock-time';
+export * from './date-range';
 export * from './dates';
 export * from './errors';
 export * from './id-schema';

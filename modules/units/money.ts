@@ -3,8 +3,13 @@ import { z } from 'zod';
 /** Whole minor units of a currency (euro cents). Never a float. */
 export type Cents = number;
 
+const amountMessage = 'Write an amount of money from 0 to 10,000,000.';
+
 /** Zod type of an amount that is not negative. */
-export const centsSchema = z.int().min(0).max(1_000_000_000);
+export const centsSchema = z
+  .int(amountMessage)
+  .min(0, amountMessage)
+  .max(1_000_000_000, amountMessage);
 
 /**
  * Pay for some minutes at an hourly rate and a percentage of it, rounded once, half up, to a whole

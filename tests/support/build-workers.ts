@@ -1,4 +1,4 @@
-import { buildWorker } from '../../modules/solver/build-worker.mjs';
+import { buildWorker } from '@/modules/solver/build-worker.mjs';
 
-/** Runs once before all tests: the solver's worker is a built file. */
+/** Solver threads run a bundled file: it is built once before all tests. */
 export default buildWorker;

@@ -1,0 +1,28 @@
+import type { HoursPerson } from '@/modules/hours';
+import { signed } from './format-hours';
+import { HoursCell } from './hours-cell';
+import { hasDifference, isRecorded } from './sum-hours';
+
+interface Props {
+  readonly person: HoursPerson;
+  readonly format: (minutes: number) => string;
+}
+
+/** Worked hours and their difference from the plan, or that nothing is recorded. */
+export function WorkedCells({ person, format }: Props) {
+  if (!isRecorded(person)) {
+    return (
+      <td colSpan={2} data-figure className="text-second text-ink3">
+        not recorded
+      </td>
+    );
+  }
+  return (
+    <>
+      <HoursCell minutes={person.workedMinutes} format={format} />
+      <td data-figure className={hasDifference(person) ? 'font-[660]' : 'text-ink3'}>
+        {signed(person.differenceMinutes, format)}
+      </td>
+    </>
+  );
+}

@@ -1,0 +1,28 @@
+import { DialogFrame } from '@/app/_ui/dialog-frame';
+import type { Member } from '@/modules/access';
+import type { RoleGroup } from './role-choices';
+import { RolesForm } from './roles-form';
+import type { MemberChangeOf } from './use-member-changes';
+
+interface Props {
+  readonly member: Member;
+  readonly groups: readonly RoleGroup[];
+  readonly isOwn: boolean;
+  readonly isOpen: boolean;
+  readonly onOpenChange: (isOpen: boolean) => void;
+  readonly onChange: (change: MemberChangeOf) => Promise<unknown>;
+}
+
+/** The roles of a member as boxes to tick. Stays open with what was ticked when it is refused. */
+export function RolesDialog({ member, isOpen, onOpenChange, ...form }: Props) {
+  return (
+    <DialogFrame
+      role="dialog"
+      title={`Roles of ${member.name}`}
+      isOpen={isOpen}
+      onOpenChange={onOpenChange}
+    >
+      {(close) => <RolesForm member={member} onClose={close} {...form} />}
+    </DialogFrame>
+  );
+}

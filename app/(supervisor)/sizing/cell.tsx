@@ -1,0 +1,89 @@
+import { type ComponentProps, useId } from 'react';
+import { controlClass, useNotes } from '@/app/_ui/field-frame';
+
+interface CellText {
+  /** Column and line, e.g. "Days on, Vet Early": the cell shows no label of its own. */
+  readonly label: string;
+  readonly error?: string | undefined;
+}
+
+/** What label and error add to the control of a cell, and the error's own element. */
+function useCell({ label, error }: CellText) {
+  const id = useId();
+  const notes = useNotes(id, undefined, error);
+  const control = {
+    'aria-label': label,
+    'aria-describedby': notes.describedBy,
+    'aria-invalid': error ? (true as const) : undefined,
+  };
+  return { control, notes: notes.element };
+}
+
+/** One line of text in a cell; its error stands below it. Takes `register('name')`. */
+export function CellInput({
+  label,
+  error,
+  className = '',
+  ...input
+}: CellText & ComponentProps<'input'>) {
+  const { control, notes } = useCell({ label, error });
+  return (
+    <div className={className}>
+      <input type="text" autoComplete="off" {...input} {...control} className={controlClass} />
+      {notes}
+    </div>
+  );
+}
+
+/** A choice of one in a cell; its options are the children. */
+export function CellSelect({
+  label,
+  error,
+  className = '',
+  children,
+  ...select
+}: CellText & ComponentProps<'select'>) {
+  const { control, notes } = useCell({ label, error });
+  return (
+    <div className={className}>
+      <select {...select} {...control} className={controlClass}>
+        {children}
+      </select>
+      {notes}
+    </div>
+  );
+}
+
+interface CellChoicesProps extends CellText {
+  readonly choices: readonly { readonly value: string; readonly label: string }[];
+  /** What `register('name')` gives; each choice carries its own value. */
+  readonly field: ComponentProps<'input'>;
+}
+
+/** Several choices side by side in a cell, each with its letters above its box. */
+export function CellChoices({ label, error, choices, field }: CellChoicesProps) {
+  const { control, notes } = useCell({ label, error });
+  return (
+    <fieldset
+      aria-label={control['aria-label']}
+      aria-describedby={control['aria-describedby']}
+      className="min-w-max"
+    >
+      <div className="flex">
+        {choices.map((choice) => (
+          <label key={choice.value} className="grid w-7 place-items-center text-note phone:w-9">
+            {choice.label}
+            <input
+              type="checkbox"
+              {...field}
+              value={choice.value}
+              aria-invalid={control['aria-invalid']}
+              className="size-6 accent-act"
+            />
+          </label>
+        ))}
+      </div>
+      {notes}
+    </fieldset>
+  );
+}

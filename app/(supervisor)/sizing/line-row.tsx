@@ -1,0 +1,119 @@
+import { useFormContext, useWatch } from 'react-hook-form';
+import { Button } from '@/app/_ui/button';
+import { clockRange } from '@/app/_ui/clock';
+import type { ShiftKind } from '@/modules/coverage';
+import type { Skill } from '@/modules/people';
+import { weekdayNames } from '@/modules/units';
+import { CellChoices, CellInput, CellSelect } from './cell';
+import type { LineForm, SizingForm } from './sizing-form';
+
+interface Props {
+  readonly index: number;
+  readonly kinds: readonly ShiftKind[];
+  readonly skills: readonly Skill[];
+  readonly onRemove: () => void;
+}
+
+const firstDays = weekdayNames.map((name, weekday) => ({
+  value: String(weekday),
+  label: name.slice(0, 2),
+}));
+
+/** The columns of the table behind the first, in order; hint stands under the head. */
+export const lineColumns = [
+  { head: 'Shift kind', hint: '' },
+  { head: 'Skill', hint: '' },
+  { head: 'Days on', hint: 'in a row' },
+  { head: 'First days', hint: 'of the run' },
+  { head: 'Pay, weekday', hint: 'for a day worked' },
+  { head: 'Pay, Saturday', hint: '' },
+  { head: 'Pay, Sunday', hint: '' },
+  { head: 'Pay, extra day', hint: 'beyond 5 in a row' },
+  { head: 'Most people', hint: 'empty: no limit' },
+  { head: 'Most, %', hint: 'of everybody' },
+] as const;
+
+/** One line of the table: a pattern of work, every cell a field of its own. */
+export function LineRow({ index, kinds, skills, onRemove }: Props) {
+  const { register, formState } = useFormContext<SizingForm>();
+  const errors = formState.errors.lines?.[index];
+  const name = useWatch<SizingForm, `lines.${number}.name`>({ name: `lines.${index}.name` });
+  const line = name || `pattern ${index + 1}`;
+  const cell = (field: Exclude<keyof LineForm, 'id'>, column: string) => ({
+    ...register(`lines.${index}.${field}`),
+    label: `${column}, ${line}`,
+    error: errors?.[field]?.message,
+  });
+  const { label, error, ...days } = cell('startWeekdays', 'First days');
+  return (
+    <tr>
+      <th scope="row">
+        <CellInput {...cell('name', 'Pattern')} maxLength={60} className="w-44 phone:w-36" />
+      </th>
+      <td>
+        <CellSelect {...cell('shiftKindId', 'Shift kind')} className="w-44">
+          {kinds.map((kind) => (
+            <option key={kind.id} value={kind.id}>
+              {kind.name} {clockRange(kind.startMinute, kind.endMinute)}
+            </option>
+          ))}
+        </CellSelect>
+      </td>
+      <td>
+        <CellSelect {...cell('skillId', 'Skill')} className="w-32">
+          <option value="">None</option>
+          {skills.map((skill) => (
+            <option key={skill.id} value={skill.id}>
+              {skill.name}
+            </option>
+          ))}
+        </CellSelect>
+      </td>
+      <td>
+        <CellInput {...cell('daysOn', 'Days on')} inputMode="numeric" className="w-14" />
+      </td>
+      <td>
+        <CellChoices label={label} error={error} choices={firstDays} field={days} />
+      </td>
+      <td>
+        <CellInput
+          {...cell('weekdayCents', 'Pay of a weekday')}
+          inputMode="decimal"
+          className="w-24"
+        />
+      </td>
+      <td>
+        <CellInput
+          {...cell('saturdayCents', 'Pay of a Saturday')}
+          inputMode="decimal"
+          className="w-24"
+        />
+      </td>
+      <td>
+        <CellInput
+          {...cell('sundayCents', 'Pay of a Sunday')}
+          inputMode="decimal"
+          className="w-24"
+        />
+      </td>
+      <td>
+        <CellInput
+          {...cell('extraDayCents', 'Pay of an extra day')}
+          inputMode="decimal"
+          className="w-24"
+        />
+      </td>
+      <td>
+        <CellInput {...cell('mostPeople', 'Most people')} inputMode="numeric" className="w-20" />
+      </td>
+      <td>
+        <CellInput {...cell('mostPercent', 'Most percent')} inputMode="numeric" className="w-16" />
+      </td>
+      <td>
+        <Button look="quiet" onClick={onRemove} aria-label={`Remove ${line}`}>
+          Remove
+        </Button>
+      </td>
+    </tr>
+  );
+}

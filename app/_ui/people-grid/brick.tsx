@@ -1,0 +1,46 @@
+import type { BoardKind } from '@/modules/roster';
+
+/** How a brick is drawn apart from its tone. */
+export interface BrickLook {
+  /** Dashed: the person works in a second skill. */
+  readonly isSecondSkill?: boolean;
+  /** Outline and letter only: a day before the period, or somebody who comes from another group. */
+  readonly isPale?: boolean;
+  readonly isPinned?: boolean;
+}
+
+interface Props extends BrickLook {
+  readonly kind: Pick<BoardKind, 'tone'>;
+  readonly letter: string;
+  /** Hours below the letter where there is room. */
+  readonly times?: string | undefined;
+  readonly className?: string;
+  readonly style?: React.CSSProperties;
+}
+
+const tones = [
+  'bg-(--brick-0) text-(--brick-letter)',
+  'bg-(--brick-1) text-(--brick-letter)',
+  'bg-(--brick-2) text-(--brick-letter)',
+  'bg-(--brick-3) text-(--brick-letter-night)',
+] as const;
+
+/** One shift: tone by lateness, letter inside. Decoration; the cell around it is labelled in full. */
+export function Brick({ kind, letter, times, className = '', style, ...look }: Props) {
+  const tone = look.isPale ? 'bg-transparent text-ink3' : tones[kind.tone];
+  const line = look.isPale ? 'border-edge' : 'border-ink';
+  const dash = look.isSecondSkill ? `border-dashed ${kind.tone === 3 ? innerDash : ''}` : '';
+  return (
+    <span
+      aria-hidden="true"
+      style={style}
+      className={`figures flex flex-col items-center justify-center border-[1.25px] text-note leading-none font-[760] ${tone} ${line} ${dash} ${look.isPinned ? 'border-b-3' : ''} ${className}`}
+    >
+      {letter}
+      {times ? <span className="mt-0.5 text-[0.6875rem] font-[560]">{times}</span> : null}
+    </span>
+  );
+}
+
+/** On a dark brick the dashed outline would be ink on ink, so a second one runs inside. */
+const innerDash = 'outline-1 -outline-offset-3 outline-dashed outline-(--brick-letter-night)';

@@ -1,0 +1,2 @@
+export { BoardView } from './board-view';
+export { Brick } from './brick';

@@ -1,0 +1,3 @@
+export * from './date-words';
+export * from './fake-mail';
+export type * from './publication';

@@ -1,0 +1,68 @@
+/**
+ * A linear program, plain or with whole-number columns: bounds on columns and rows, a sparse matrix
+ * stored row by row (row `i` holds the entries `starts[i]` to `starts[i + 1]`), and named objectives of
+ * which one is chosen when it is solved or written. A missing bound is an infinity.
+ */
+export interface LinearModel {
+  readonly name: string;
+  /** What the short names of columns and rows stand for, a line each; comments of the LP file. */
+  readonly legend: readonly string[];
+  readonly columnNames: readonly string[];
+  readonly columnLower: Float64Array;
+  readonly columnUpper: Float64Array;
+  /** 1: whole numbers only. */
+  readonly isInteger: Uint8Array;
+  readonly rowNames: readonly string[];
+  readonly rowLower: Float64Array;
+  readonly rowUpper: Float64Array;
+  readonly starts: Int32Array;
+  readonly indices: Int32Array;
+  readonly values: Float64Array;
+  readonly objectives: { readonly [name: string]: Objective };
+}
+
+/** Sum of `costs[column] x value[column]`, plus a constant. */
+export interface Objective {
+  readonly sense: 'minimise' | 'maximise';
+  readonly offset: number;
+  readonly costs: Float64Array;
+}
+
+/** The objective of that name; an unknown name is a bug of the caller and throws. */
+export function objectiveOf(model: LinearModel, name: string): Objective {
+  const objective = model.objectives[name];
+  if (!objective) throw new Error(`The model ${model.name} has no objective ${name}.`);
+  return objective;
+}
+
+/** Value of an objective at a point. */
+export function objectiveValue(objective: Objective, values: ArrayLike<number>): number {
+  return (
+    objective.costs.reduce((sum, cost, column) => sum + cost * (values[column] ?? 0), 0) +
+    objective.offset
+  );
+}
+
+/** The same model with other bounds on one row. */
+export function withRowBounds(
+  model: LinearModel,
+  row: number,
+  lower: number,
+  upper: number,
+): LinearModel {
+  const rowLower = model.rowLower.slice();
+  const rowUpper = model.rowUpper.slice();
+  rowLower[row] = lower;
+  rowUpper[row] = upper;
+  return { ...model, rowLower, rowUpper };
+}
+
+/** The same model with other upper bounds on all columns. */
+export function withColumnUpper(model: LinearModel, columnUpper: Float64Array): LinearModel {
+  return { ...model, columnUpper };
+}
+
+/** The linear relaxation: every column may take fractions. */
+export function relaxed(model: LinearModel): LinearModel {
+  return { ...model, isInteger: new Uint8Array(model.isInteger.length) };
+}

@@ -1,0 +1,65 @@
+import type { Problem } from '../../problem';
+import type { ModelBuilder } from '../model-builder';
+import { centsPerMinute, timePay } from '../pay';
+import type { PersonWork } from '../work-columns';
+
+/**
+ * Contract hours: minimumMinutes <= paid worked minutes + creditMinutes <= maximumMinutes; an equality
+ * where the two are equal. Row hours(person), in minutes. Source: the contract.
+ */
+export function addHoursRow(
+  builder: ModelBuilder,
+  { person, personIndex, columns }: PersonWork,
+): void {
+  builder.addRow({
+    name: `hours(p${personIndex})`,
+    lower: person.minimumMinutes - person.creditMinutes,
+    upper: person.maximumMinutes - person.creditMinutes,
+    entries: columns.map(({ column, shift }) => [column, shift.paidMinutes]),
+  });
+}
+
+/**
+ * Overtime: overtime(person) >= paid worked minutes + creditMinutes - contractMinutes. Row
+ * overtime(person); the column costs overtimePercent of the rate a minute for people paid by contract,
+ * and what it adds to ordinary pay for people paid by hours. Answers the column, or null when the
+ * contract leaves no room for overtime or it costs nothing. Source: the pay rules.
+ */
+export function addOvertime(
+  builder: ModelBuilder,
+  problem: Problem,
+  { person, personIndex, columns }: PersonWork,
+): number | null {
+  const room = person.maximumMinutes - person.contractMinutes;
+  const ordinaryPercent = person.paidBy === 'contract' ? 0 : 100;
+  const percent = problem.pay.overtimePercent - ordinaryPercent;
+  if (room <= 0 || percent === 0) return null;
+  const column = builder.addColumn({
+    name: `overtime(p${personIndex})`,
+    upper: room,
+    costs: { cost: centsPerMinute(person.payCentsPerHour, percent) },
+  });
+  builder.addRow({
+    name: `overtime(p${personIndex})`,
+    upper: person.contractMinutes - person.creditMinutes,
+    entries: [
+      ...columns.map(({ column: worked, shift }) => [worked, shift.paidMinutes] as const),
+      [column, -1],
+    ],
+  });
+  return column;
+}
+
+/**
+ * Ordinary pay of people paid by contract is the same for every roster: a constant of the cost. That of
+ * people paid by hours stands on their work columns.
+ */
+export function addContractPay(
+  builder: ModelBuilder,
+  problem: Problem,
+  { person }: PersonWork,
+): void {
+  if (person.paidBy === 'contract') {
+    builder.addOffset('cost', timePay(problem, person, 0).ordinary);
+  }
+}

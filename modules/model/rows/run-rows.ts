@@ -1,0 +1,50 @@
+import type { Problem } from '../../problem';
+import type { ModelBuilder } from '../model-builder';
+import type { PersonWork, WorkColumn } from '../work-columns';
+
+/**
+ * Longest run of days: in any `longestRunDays + 1` days in a row at least one is free. Rows
+ * run(person, first day): sum of work over the window <= longestRunDays - days of history worked in it.
+ * House rule; see `ruleSources`.
+ */
+export function addDayRunRows(builder: ModelBuilder, problem: Problem, work: PersonWork): void {
+  const longest = problem.rules.longestRunDays;
+  if (longest === null) return;
+  const worked = new Set(work.person.history.map(({ dayIndex }) => dayIndex));
+  addWindowRows(builder, { name: 'run', longest, worked, work, counts: () => true });
+}
+
+/** Longest run of Nights, in the same way. Rows nightrun(person, first day). */
+export function addNightRunRows(builder: ModelBuilder, problem: Problem, work: PersonWork): void {
+  const longest = problem.rules.longestRunNights;
+  if (longest === null) return;
+  const nights = work.person.history.filter(({ isNight }) => isNight);
+  const worked = new Set(nights.map(({ dayIndex }) => dayIndex));
+  const counts = ({ shift }: WorkColumn) => shift.isNight;
+  addWindowRows(builder, { name: 'nightrun', longest, worked, work, counts });
+}
+
+interface Run {
+  readonly name: string;
+  readonly longest: number;
+  /** Days of history (negative) that belong to the run. */
+  readonly worked: ReadonlySet<number>;
+  readonly work: PersonWork;
+  readonly counts: (work: WorkColumn) => boolean;
+}
+
+function addWindowRows(builder: ModelBuilder, run: Run): void {
+  const { byDay, personIndex } = run.work;
+  for (let first = -run.longest; first + run.longest < byDay.length; first += 1) {
+    const days = Array.from({ length: run.longest + 1 }, (_, index) => first + index);
+    const room = run.longest - days.filter((day) => run.worked.has(day)).length;
+    const counted = days.map((day) => (byDay[day] ?? []).filter(run.counts));
+    const canBeWorked = counted.filter((works) => works.length > 0).length;
+    if (canBeWorked <= room) continue;
+    builder.addRow({
+      name: `${run.name}(p${personIndex},d${first})`,
+      upper: room,
+      entries: counted.flat().map(({ column }) => [column, 1]),
+    });
+  }
+}

@@ -1,0 +1,104 @@
+import { and, desc, eq, max } from 'drizzle-orm';
+import { db } from '../../db/client';
+import { rosters, runs, users } from '../../db/schema';
+import type { PlannedRoster, Problem } from '../problem';
+import type { RosterId, RunId, TeamId, UserId } from '../units';
+import type { Run, RunEnd } from './stored';
+
+const selectRuns = () =>
+  db()
+    .select({
+      id: runs.id,
+      rosterId: runs.rosterId,
+      teamId: rosters.teamId,
+      number: runs.number,
+      state: runs.state,
+      limitSeconds: runs.limitSeconds,
+      startsOn: rosters.startsOn,
+      endsOn: rosters.endsOn,
+      startedAtUtc: runs.startedAtUtc,
+      endedAtUtc: runs.endedAtUtc,
+      startedBy: runs.startedBy,
+      startedByName: users.name,
+      proof: runs.proof,
+      boundCents: runs.boundCents,
+      shortageBoundMinutes: runs.shortageBoundMinutes,
+      isProvenOptimal: runs.isProvenOptimal,
+      failure: runs.failure,
+    })
+    .from(runs)
+    .innerJoin(rosters, eq(rosters.id, runs.rosterId))
+    .innerJoin(users, eq(users.id, runs.startedBy));
+
+/** Starts a run's row with the next number of its roster. */
+export function insertRun(run: {
+  readonly id: RunId;
+  readonly rosterId: RosterId;
+  readonly limitSeconds: number;
+  readonly startedAtUtc: number;
+  readonly startedBy: UserId;
+  readonly problem: Problem;
+}): void {
+  const newest = db()
+    .select({ number: max(runs.number) })
+    .from(runs)
+    .where(eq(runs.rosterId, run.rosterId))
+    .get();
+  db()
+    .insert(runs)
+    .values({ ...run, number: (newest?.number ?? 0) + 1, state: 'running' })
+    .run();
+}
+
+export function findRun(id: RunId): Run | null {
+  return selectRuns().where(eq(runs.id, id)).get() ?? null;
+}
+
+/** The input of a run and the best roster found; throws for an unknown run. */
+export function readRunDocuments(id: RunId): {
+  readonly problem: Problem;
+  readonly roster: PlannedRoster | null;
+} {
+  const row = db()
+    .select({ problem: runs.problem, roster: runs.roster })
+    .from(runs)
+    .where(eq(runs.id, id))
+    .get();
+  if (!row) throw new Error(`No run ${id}`);
+  return row;
+}
+
+/** The runs of a team, newest first. */
+export function listRunsOf(teamId: TeamId): Run[] {
+  return selectRuns()
+    .where(eq(rosters.teamId, teamId))
+    .orderBy(desc(runs.startedAtUtc), desc(runs.number))
+    .all();
+}
+
+export function findRunningRun(rosterId: RosterId): Run | null {
+  return (
+    selectRuns()
+      .where(and(eq(runs.rosterId, rosterId), eq(runs.state, 'running')))
+      .get() ?? null
+  );
+}
+
+export function listRunningRuns(): Run[] {
+  return selectRuns().where(eq(runs.state, 'running')).all();
+}
+
+/** Keeps the best roster so far, so that a crash loses little. */
+export function keepRunRoster(id: RunId, roster: PlannedRoster): void {
+  db().update(runs).set({ roster }).where(eq(runs.id, id)).run();
+}
+
+/** Ends a running run; false when it had ended already. */
+export function endRun(id: RunId, end: RunEnd): boolean {
+  const outcome = db()
+    .update(runs)
+    .set(end)
+    .where(and(eq(runs.id, id), eq(runs.state, 'running')))
+    .run();
+  return outcome.changes === 1;
+}

@@ -1,0 +1,2 @@
+export { readLatestSizing, readSizingSheet } from './read-sizing';
+export { sizeTeam } from './size-team';

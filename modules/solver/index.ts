@@ -1,0 +1,2 @@
+export type * from './linear-outcome';
+export type * from './roster-outcome';

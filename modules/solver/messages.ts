@@ -1,0 +1,34 @@
+import type { MessagePort } from 'node:worker_threads';
+import type { LinearModel } from '../model';
+import type { Problem, SizingProblem } from '../problem';
+import type { RosterProgress, SolvedRoster } from './roster-outcome';
+import type { RosterOptions } from './search-roster';
+
+/** What a solver thread can be asked to do. */
+export type SolverJob =
+  | { readonly kind: 'roster'; readonly problem: Problem; readonly options: RosterOptions }
+  | { readonly kind: 'sizing'; readonly problem: SizingProblem; readonly limitSeconds: number }
+  | {
+      readonly kind: 'linear';
+      readonly model: LinearModel;
+      readonly objective: string;
+      readonly options: {
+        readonly limitSeconds: number;
+        readonly targetGap: number;
+        readonly seed: number;
+      };
+    };
+
+/** A job as it crosses to the thread. */
+export interface SolverTask {
+  readonly job: SolverJob;
+  /** Carries `SolverMessage`s out while the thread computes. */
+  readonly port: MessagePort;
+  /** One Int32: 0, or 1 to stop. A message could not reach a thread that computes. */
+  readonly stopFlag: SharedArrayBuffer;
+}
+
+export type SolverMessage =
+  | { readonly kind: 'started' }
+  | { readonly kind: 'progress'; readonly progress: RosterProgress }
+  | { readonly kind: 'roster'; readonly solved: SolvedRoster };

@@ -1,0 +1,51 @@
+import { MessageChannel } from 'node:worker_threads';
+import type { SolverJob, SolverMessage, SolverTask } from './messages';
+import { solverPool } from './pool';
+
+/** A thread that does not answer a stop is ended after this; its best roster is already here. */
+const hardStopAfterMs = 2000;
+/** And one that overruns its time limit, after this. */
+const overrunMs = 3000;
+
+export interface JobOptions {
+  readonly limitSeconds: number;
+  readonly stop?: AbortSignal | undefined;
+  readonly onMessage?: (message: SolverMessage) => void;
+}
+
+/** How a job ended on this side: with an answer, by force, or because its thread broke. */
+export type JobEnd<T> =
+  | { readonly kind: 'answered'; readonly answer: T }
+  | { readonly kind: 'killed'; readonly wasStopped: boolean }
+  | { readonly kind: 'broken'; readonly cause: unknown };
+
+/** Runs a job in a solver thread. The event loop stays free; never rejects. */
+export async function runJob<T>(job: SolverJob, options: JobOptions): Promise<JobEnd<T>> {
+  const { port1, port2 } = new MessageChannel();
+  const stopFlag = new SharedArrayBuffer(Int32Array.BYTES_PER_ELEMENT);
+  const kill = new AbortController();
+  const timers: NodeJS.Timeout[] = [];
+  const killAfter = (ms: number) => timers.push(setTimeout(() => kill.abort(), ms));
+  const requestStop = () => {
+    Atomics.store(new Int32Array(stopFlag), 0, 1);
+    killAfter(hardStopAfterMs);
+  };
+  port1.on('message', (message: SolverMessage) => {
+    if (message.kind === 'started') killAfter(options.limitSeconds * 1000 + overrunMs);
+    options.onMessage?.(message);
+  });
+  if (options.stop?.aborted) requestStop();
+  options.stop?.addEventListener('abort', requestStop, { once: true });
+  try {
+    const task: SolverTask = { job, port: port2, stopFlag };
+    const given = { transferList: [port2], signal: kill.signal };
+    return { kind: 'answered', answer: await solverPool().run(task, given) };
+  } catch (cause) {
+    if (!kill.signal.aborted) return { kind: 'broken', cause };
+    return { kind: 'killed', wasStopped: options.stop?.aborted ?? false };
+  } finally {
+    options.stop?.removeEventListener('abort', requestStop);
+    for (const timer of timers) clearTimeout(timer);
+    port1.close();
+  }
+}
