@@ -33,8 +33,9 @@ export function useCoverageChange<Input, Answer = unknown>(
   return useMutation({
     mutationFn: call,
     networkMode: 'always',
-    onSuccess: async (answer, input) => {
-      await client.invalidateQueries();
+    onSuccess: (answer, input) => {
+      // Not waited for: a dialog closes once its change is saved.
+      void client.invalidateQueries();
       announce(say(input, answer));
     },
   });

@@ -11,7 +11,10 @@ interface Props<T> {
 export function ChoiceBar<T extends string | number>(props: Props<T>) {
   const { label, choices, value, onChange, className = '' } = props;
   return (
-    <fieldset aria-label={label} className={`flex border-[1.25px] border-ink ${className}`}>
+    <fieldset
+      aria-label={label}
+      className={`flex border-[1.25px] border-ink print:hidden ${className}`}
+    >
       {choices.map((choice) => (
         <button
           key={choice.value}

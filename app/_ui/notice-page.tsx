@@ -10,7 +10,9 @@ interface Props {
 export function NoticePage({ title, children }: Props) {
   return (
     <div className="px-(--page) pt-3">
-      <Brand />
+      <header>
+        <Brand />
+      </header>
       <main className="mt-9 max-w-[34rem]">
         <h1 className="text-title font-[640] phone:text-[1.5625rem]">{title}</h1>
         <div className="mt-2 space-y-4 text-body">{children}</div>

@@ -34,7 +34,7 @@ export function Table({ label, children, holdsFirstColumn = true, maxHeight }: P
       // biome-ignore lint/a11y/noNoninteractiveTabindex: a strip that scrolls must take the keyboard
       tabIndex={0}
       aria-label={label}
-      className="max-w-full overflow-auto print:overflow-visible"
+      className="relative max-w-full overflow-auto print:overflow-visible"
       style={{ maxHeight }}
     >
       <table className={`${lines} ${holdsFirstColumn ? held : ''}`}>

@@ -15,9 +15,9 @@ export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>
   const target = safePath(typeof callbackUrl === 'string' ? callbackUrl : undefined);
   return (
     <div className="flex min-h-dvh flex-col">
-      <div className="flex justify-end px-(--page) pt-4">
+      <header className="flex justify-end px-(--page) pt-4">
         <ThemeSwitch />
-      </div>
+      </header>
       <main className="mx-auto flex w-full max-w-[76rem] flex-wrap justify-between gap-9 px-(--page) pt-4 pb-9">
         <div className="max-w-[26rem]">
           <h1 className="flex items-center gap-4 text-figure font-[680] phone:text-title">

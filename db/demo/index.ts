@@ -6,6 +6,7 @@ import { organisations } from '../schema';
 import { demoPassword } from './accounts.mjs';
 import { demoDates } from './dates';
 import { insertAccount } from './insert-account';
+import { insertRosters } from './insert-rosters';
 import { insertTeam } from './insert-team';
 import { organisation, ravelmere } from './ravelmere';
 import { riverside } from './riverside';
@@ -28,7 +29,9 @@ export async function loadDemo(now: number): Promise<void> {
     const account = { organisationId, passwordHash };
     insertAccount('Rowan Keele', { role: 'owner', teamId: null }, account);
     insertAccount('Marcus Tealby', { role: 'hr', teamId: null }, account);
-    for (const team of [ravelmere, riverside]) insertTeam(team, dates, account);
+    const { teamId, supervisorId } = insertTeam(ravelmere, dates, account);
+    insertRosters(teamId, supervisorId, dates, now);
+    insertTeam(riverside, dates, account);
   });
 }
 

@@ -57,9 +57,23 @@ export function withRowBounds(
   return { ...model, rowLower, rowUpper };
 }
 
-/** The same model with other upper bounds on all columns. */
-export function withColumnUpper(model: LinearModel, columnUpper: Float64Array): LinearModel {
-  return { ...model, columnUpper };
+/**
+ * The same model with one more objective to be made least: weight x first + second. With a great weight
+ * the first comes first, but only nearly: proofs need the two one after the other.
+ */
+export function withBlend(
+  model: LinearModel,
+  name: string,
+  [first, weight, second]: readonly [first: string, weight: number, second: string],
+): LinearModel {
+  const one = objectiveOf(model, first);
+  const other = objectiveOf(model, second);
+  const costs = one.costs.map((cost, column) => weight * cost + (other.costs[column] ?? 0));
+  const offset = weight * one.offset + other.offset;
+  return {
+    ...model,
+    objectives: { ...model.objectives, [name]: { sense: 'minimise', offset, costs } },
+  };
 }
 
 /** The linear relaxation: every column may take fractions. */

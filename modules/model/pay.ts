@@ -20,7 +20,7 @@ export const overtimeOf = (person: ProblemPerson, workedMinutes: number): number
 
 /**
  * Ordinary pay and overtime pay in cents. Paid by contract: the contract in any case. Paid by hours:
- * the worked minutes that are no overtime. Overtime is paid at its percentage of the rate. Each of the
+ * the worked minutes and credited leave that are no overtime. Overtime is paid at its percentage of the rate. Each of the
  * two is rounded once for the whole period.
  */
 export function timePay(
@@ -31,7 +31,9 @@ export function timePay(
   const rate = person.payCentsPerHour;
   const overtimeMinutes = overtimeOf(person, workedMinutes);
   const ordinaryMinutes =
-    person.paidBy === 'contract' ? person.contractMinutes : workedMinutes - overtimeMinutes;
+    person.paidBy === 'contract'
+      ? person.contractMinutes
+      : workedMinutes + person.creditMinutes - overtimeMinutes;
   return {
     ordinary: payFor(rate, ordinaryMinutes),
     overtime: payFor(rate, overtimeMinutes, pay.overtimePercent),

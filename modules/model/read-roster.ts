@@ -1,4 +1,4 @@
-import type { PlannedRoster } from '../problem';
+import type { PlannedRoster, ProblemFloor } from '../problem';
 import { payFor } from '../units';
 import { centsPerMinute, overtimeOf, premiumPay, timePay } from './pay';
 import type { RosterModel } from './roster-model';
@@ -90,6 +90,28 @@ export function completeValues(model: RosterModel, values: ArrayLike<number>): F
 }
 
 /**
+ * What a roster leaves open, as floors of their own: with them the rest of the people can be planned
+ * around it.
+ */
+export function openFloors(model: RosterModel, values: ArrayLike<number>): ProblemFloor[] {
+  return model.floors.flatMap((floor) => {
+    const { skillId, counting, startMinute, endMinute } = floor;
+    return missingIn(floor, values)
+      .filter(([, people]) => people > 0)
+      .map(([{ priceCentsPerHour }, people]) => ({
+        floorId: 'open',
+        dayIndex: 0,
+        startMinute,
+        endMinute,
+        skillId,
+        people,
+        counting,
+        priceCentsPerHour,
+      }));
+  });
+}
+
+/**
  * How far the objective `cost` of the model can lie from the whole cents of `weighRoster`: half a cent
  * for each sum that is rounded once and whose cents a minute do not always come out whole.
  */
@@ -106,7 +128,7 @@ export function roundingSlackCents(model: RosterModel): number {
     const overtime = isWhole(person.payCentsPerHour, minutes, problem.pay.overtimePercent);
     return person.paidBy === 'contract'
       ? [overtime]
-      : [overtime, isWhole(person.payCentsPerHour, minutes)];
+      : [overtime, isWhole(person.payCentsPerHour, greatestDivisor(step, person.creditMinutes))];
   });
   const prices = model.floors.flatMap(({ startMinute, endMinute, shorts }) =>
     shorts.map((short) => [short.priceCentsPerHour ?? 0, endMinute - startMinute] as const),

@@ -2,7 +2,7 @@ import type { Problem } from '../problem';
 import type { LinearModel } from './linear-model';
 import { ModelBuilder } from './model-builder';
 import { addFloorRows, type FloorRow } from './rows/floor-rows';
-import { addContractPay, addHoursRow, addOvertime } from './rows/hours-rows';
+import { addConstantPay, addHoursRow, addOvertime } from './rows/hours-rows';
 import { addNightRow } from './rows/night-rows';
 import { addPinRows } from './rows/pin-rows';
 import { addRestRows } from './rows/rest-rows';
@@ -63,7 +63,7 @@ function addPersonRows(
   addNightRow(builder, problem, work);
   addPinRows(builder, work);
   addHoursRow(builder, work);
-  addContractPay(builder, problem, work);
+  addConstantPay(builder, problem, work);
   return {
     overtime: addOvertime(builder, problem, work),
     weekends: addWeekendRows(builder, problem, work),

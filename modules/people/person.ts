@@ -26,7 +26,7 @@ export interface Contract {
   readonly underMinutes: number;
   readonly overtimeMinutes: number;
   readonly payCentsPerHour: number;
-  /** contract: contract hours are paid in any case. hours: only worked hours are paid. */
+  /** contract: contract hours are paid in any case. hours: worked hours and credited leave are paid. */
   readonly paidBy: 'contract' | 'hours';
   readonly mayWorkNights: boolean;
 }

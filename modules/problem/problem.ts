@@ -78,7 +78,7 @@ export const problemPersonSchema = z.strictObject({
   /** Home skill first. Only skills that are valid through the period. */
   skillIds: z.array(z.string()).min(1),
   payCentsPerHour: centsSchema,
-  /** contract: contract hours are paid in any case. hours: only worked hours are paid. */
+  /** contract: contract hours are paid in any case. hours: worked hours and credited leave are paid. */
   paidBy: z.enum(['contract', 'hours']),
   /** Hours the contract gives in this period, leave included. */
   contractMinutes: z.int().min(0),

@@ -3,7 +3,7 @@ import { now } from '../../db/clock';
 import { log } from '../../db/log';
 import type { Actor } from '../access';
 import { recordAudit } from '../access/server';
-import type { Problem } from '../problem';
+import type { PlannedRoster, Problem } from '../problem';
 import type { Proof } from '../proof';
 import type { RosterOutcome } from '../solver';
 import { solveRoster } from '../solver/server';
@@ -28,7 +28,7 @@ export async function conductRun(
       limitSeconds: run.limitSeconds,
       stop: active.stop.signal,
       onProgress: reporter.report,
-      onRoster: (roster) => keepRunRoster(run.id, roster),
+      onRoster: (roster) => keepBest(run, roster),
     });
     reporter.flush();
     settleRun(actor, run, problem, outcome);
@@ -36,6 +36,15 @@ export async function conductRun(
     log().error({ err: cause, runId: run.id }, 'run broke off');
     reporter.flush();
     failRun(run, 'The computation broke off. The draft is unchanged; run again.');
+  }
+}
+
+/** Called from the solver's messages, where nobody would catch what is thrown. */
+function keepBest(run: Run, roster: PlannedRoster): void {
+  try {
+    keepRunRoster(run.id, roster);
+  } catch (cause) {
+    log().error({ err: cause, runId: run.id }, 'best roster of a run could not be stored');
   }
 }
 
@@ -50,13 +59,16 @@ function settleRun(actor: Actor, run: Run, problem: Problem, outcome: RosterOutc
       return;
     case 'refuse':
       if (verdict.proof) logDisagreement(run, outcome, verdict);
-      else log().warn({ runId: run.id, outcome: outcome.kind }, verdict.sentence);
+      else log().warn({ runId: run.id, err: causeOf(outcome) }, verdict.sentence);
       failRun(run, verdict.sentence, verdict.proof);
       return;
     default:
       assertNever(verdict);
   }
 }
+
+const causeOf = (outcome: RosterOutcome): unknown =>
+  outcome.kind === 'failed' ? outcome.cause : undefined;
 
 function settleAdopted(
   actor: Actor,

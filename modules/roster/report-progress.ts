@@ -1,3 +1,4 @@
+import { log } from '../../db/log';
 import type { RunId } from '../units';
 import { findNewestRunEvent, insertRunEvent } from './store';
 import type { RunEvent } from './views';
@@ -24,8 +25,13 @@ export function reportProgress(
     sequence += 1;
     const event = { ...held, sequence };
     held = null;
-    insertRunEvent(runId, event);
-    onStored(event);
+    try {
+      insertRunEvent(runId, event);
+      onStored(event);
+    } catch (cause) {
+      // A report that cannot be kept must not end the run, let alone the process from a timer.
+      log().error({ err: cause, runId }, 'report of a run could not be stored');
+    }
   };
   const later = () => {
     timer = null;

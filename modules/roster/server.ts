@@ -3,6 +3,7 @@ export { confirmRoster } from './confirm-roster';
 export { followRun, type RunFollower } from './follow-run';
 export { openPeriod } from './open-period';
 export { readOwnShifts } from './own-shifts';
+export { proveNewest } from './prove-newest';
 export { publishRoster } from './publish-roster';
 /* Reading for the use-cases of other modules, which decide who may see it: no permission check here. */
 export { listPublishedPeriods, listPublishedShifts } from './published-shifts';

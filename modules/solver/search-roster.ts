@@ -2,9 +2,9 @@ import { buildRosterModel, placeRoster, type RosterModel, relaxed, withRowBounds
 import type { Problem } from '../problem';
 import type { LinearOptions, LinearSolver } from './highs-adapter';
 import type { LinearOutcome } from './linear-outcome';
+import { planInTurn } from './plan-in-turn';
 import type { RosterOutcome } from './roster-outcome';
 import { type SearchHooks, SearchState } from './search-state';
-import { solveAlone } from './solve-alone';
 
 export interface RosterOptions {
   readonly limitSeconds: number;
@@ -14,7 +14,7 @@ export interface RosterOptions {
 }
 
 /** Share of the time for a roster that reaches the bound of the relaxation, when none is found. */
-const shortcutShare = 0.4;
+const shortcutShare = 0.25;
 /** Share of the remaining time for the least shortage, when it is not proven. */
 const stageOneShare = 0.6;
 /** Costs are whole cents: less than one between cost and bound proves the cost. */
@@ -23,7 +23,7 @@ const wholeCentGap = 0.9;
 /**
  * Least shortage first, then least cost with the shortage kept at its least; both with proven bounds.
  *
- * 0. Everybody alone: names people whose own rules clash, and gives a first lawful roster.
+ * 0. One person after the other: a first lawful roster, and the names of those whose own rules clash.
  * 1. The linear relaxation bounds the shortage from below. The shortcut looks at once for the cheapest
  *    roster that reaches this bound: when there is one, it proves stage one too. Otherwise the least
  *    shortage is searched for, starting from the best roster so far.
@@ -37,14 +37,11 @@ export function searchRoster(
 ): RosterOutcome {
   const model = buildRosterModel(problem);
   const state = new SearchState(model, options.limitSeconds, hooks);
-  const alone = solveAlone(
-    (linear, objective, given) =>
-      solve(linear, objective, { ...given, shouldStop: () => state.isStopRequested }),
-    problem,
-    () => state.remainingSeconds(),
-  );
-  if (alone.kind === 'impossible') return alone;
-  if (alone.kind === 'lawful') state.offer(placeRoster(model, alone.roster));
+  const stoppable: LinearSolver = (linear, objective, given) =>
+    solve(linear, objective, { ...given, shouldStop: () => state.isStopRequested });
+  const first = planInTurn(stoppable, model, () => state.remainingSeconds());
+  if (first.kind === 'impossible') return first;
+  if (first.kind === 'lawful') state.offer(placeRoster(model, first.roster));
   const failure = searchStages({ solve, model, state, options });
   state.report(true);
   return failure ?? conclude(state, options);

@@ -34,7 +34,12 @@ export function ChoiceFields({ teams, typed, isUnreadable, onShow }: Props) {
       data-print="off"
     >
       {teams.length > 1 ? (
-        <SelectField label="Team" className="w-56 phone:w-full" {...form.register('teamId')}>
+        <SelectField
+          label="Team"
+          className="w-56 phone:w-full"
+          defaultValue={typed.teamId}
+          {...form.register('teamId')}
+        >
           {teams.map(({ id, name }) => (
             <option key={id} value={id}>
               {name}
@@ -47,6 +52,7 @@ export function ChoiceFields({ teams, typed, isUnreadable, onShow }: Props) {
         type="date"
         error={errors.from?.message}
         className={half}
+        defaultValue={typed.from}
         {...form.register('from')}
       />
       <TextField
@@ -54,6 +60,7 @@ export function ChoiceFields({ teams, typed, isUnreadable, onShow }: Props) {
         type="date"
         error={errors.to?.message}
         className={half}
+        defaultValue={typed.to}
         {...form.register('to')}
       />
       <Button type="submit" look="primary" className="mt-[1.4rem] min-h-9! phone:mt-0 phone:w-full">

@@ -9,7 +9,7 @@ interface Props {
   readonly longest: number;
 }
 
-const width = 104;
+const width = 84;
 const height = 18;
 const top = 4;
 const thickness = 10;
@@ -22,7 +22,11 @@ export function ContractBarDrawing({ person, longest }: Props) {
   const { within, beyond, leave, contractAt } = contractBar(person, longest, width);
   const middle = top + thickness / 2;
   return (
-    <svg viewBox={`-2 0 ${width + 4} ${height}`} className="h-4.5 w-27 shrink-0" aria-hidden="true">
+    <svg
+      viewBox={`-2 0 ${width + 4} ${height}`}
+      className="h-4.5 w-22 shrink-0 self-center"
+      aria-hidden="true"
+    >
       <rect x={0} y={top} width={within.length} height={thickness} className="fill-stone" />
       {beyond ? (
         <rect

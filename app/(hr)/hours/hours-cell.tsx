@@ -1,6 +1,8 @@
+import type { FormatHours } from './format-hours';
+
 interface Props {
   readonly minutes: number;
-  readonly format: (minutes: number) => string;
+  readonly format: FormatHours;
   readonly className?: string;
 }
 
@@ -8,7 +10,7 @@ interface Props {
 export function HoursCell({ minutes, format, className = '' }: Props) {
   return (
     <td data-figure className={`${className} ${minutes === 0 ? 'text-ink3' : ''}`}>
-      {minutes === 0 ? '0' : format(minutes)}
+      {format(minutes)}
     </td>
   );
 }

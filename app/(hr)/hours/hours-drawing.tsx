@@ -35,7 +35,7 @@ export function HoursDrawing({ view, onShow }: Props) {
   if (view.people.every(({ days }) => days.length === 0))
     return <NothingPublished view={view} onShow={onShow} />;
   return (
-    <div className="grid items-start gap-x-9 gap-y-6 min-[78rem]:grid-cols-[minmax(0,1fr)_25rem]">
+    <div className="grid items-start gap-x-6 gap-y-6 min-[78rem]:grid-cols-[minmax(0,1fr)_24.5rem]">
       <div className="min-w-0">
         <UnpublishedNote view={view} />
         <CheckField
@@ -57,7 +57,7 @@ export function HoursDrawing({ view, onShow }: Props) {
       </div>
       <aside
         aria-label="Days of one person, and notes"
-        className="min-w-0 border-ink min-[78rem]:border-l min-[78rem]:pl-5"
+        className="min-w-0 border-ink min-[78rem]:self-stretch min-[78rem]:border-l min-[78rem]:pl-5"
       >
         {chosen ? (
           <PersonDays key={chosen.personId} person={chosen} id={panelId} onClose={close} />

@@ -46,5 +46,5 @@ export function HoursHead() {
 }
 
 /** The hairline that sets a group of columns apart. */
-export const groupStart = 'border-l border-l-rule';
+export const groupStart = 'border-l border-l-rule!';
 const group = `${groupStart} text-center! font-normal! text-ink2`;

@@ -6,13 +6,14 @@ import { ContractBarDrawing } from './contract-bar-drawing';
 import { HoursCell } from './hours-cell';
 import { groupStart } from './hours-head';
 import { rowId } from './place-focus';
+import type { HoursFormats } from './sum-hours';
 import { WorkedCells } from './worked-cells';
 
 interface Props {
   readonly person: HoursPerson;
   /** Minutes at the right end of the bar. */
   readonly longest: number;
-  readonly format: (minutes: number) => string;
+  readonly formats: HoursFormats;
   readonly isTabStop: boolean;
   readonly isChosen: boolean;
   readonly panelId: string;
@@ -22,15 +23,9 @@ interface Props {
 }
 
 /** One person: who, the bar against the contract with its word, and the hours. */
-export function HoursRow({ person, longest, format, isTabStop, isChosen, ...props }: Props) {
+export function HoursRow({ person, longest, formats, isTabStop, isChosen, ...props }: Props) {
   return (
-    <tr
-      className={
-        isChosen
-          ? 'outline-[2.5px] -outline-offset-[2.5px] outline-act *:bg-act-wash!'
-          : 'hover:*:bg-recess!'
-      }
-    >
+    <tr className={isChosen ? `*:bg-act-wash! ${chosenOutline}` : 'hover:*:bg-recess!'}>
       <th scope="row" className="whitespace-nowrap phone:min-w-40 phone:whitespace-normal">
         <Button
           look="quiet"
@@ -48,19 +43,37 @@ export function HoursRow({ person, longest, format, isTabStop, isChosen, ...prop
         <span className="font-normal text-ink2">{person.homeSkill}</span>
       </th>
       <td className="tabular-nums">{person.staffNumber}</td>
-      <HoursCell minutes={person.contractMinutes} format={format} />
+      <HoursCell minutes={person.contractMinutes} format={formats.contractMinutes} />
       <td>
-        <span className="flex items-center gap-2 whitespace-nowrap">
+        <span className="flex gap-2 whitespace-nowrap">
           <ContractBarDrawing person={person} longest={longest} />
-          <span className="text-second text-ink2">{againstContract(person)}</span>
+          <span className="self-baseline text-second text-ink2">{againstContract(person)}</span>
         </span>
       </td>
-      <HoursCell minutes={person.plannedMinutes} format={format} className={groupStart} />
-      <WorkedCells person={person} format={format} />
-      <HoursCell minutes={person.nightMinutes} format={format} className={groupStart} />
-      <HoursCell minutes={person.weekendMinutes} format={format} />
-      <HoursCell minutes={person.holidayMinutes} format={format} />
-      <HoursCell minutes={person.leaveMinutes} format={format} className={groupStart} />
+      <HoursCell
+        minutes={person.plannedMinutes}
+        format={formats.plannedMinutes}
+        className={groupStart}
+      />
+      <WorkedCells person={person} formats={formats} />
+      <HoursCell
+        minutes={person.nightMinutes}
+        format={formats.nightMinutes}
+        className={groupStart}
+      />
+      <HoursCell minutes={person.weekendMinutes} format={formats.weekendMinutes} />
+      <HoursCell minutes={person.holidayMinutes} format={formats.holidayMinutes} />
+      <HoursCell
+        minutes={person.leaveMinutes}
+        format={formats.leaveMinutes}
+        className={groupStart}
+      />
     </tr>
   );
 }
+
+/** The outline of a selection, drawn inside each cell: one around the row would hide behind a held column. */
+const chosenOutline =
+  '*:shadow-[inset_0_2.5px_var(--act),inset_0_-2.5px_var(--act)] ' +
+  '*:first:shadow-[inset_2.5px_2.5px_var(--act),inset_0_-2.5px_var(--act)] ' +
+  '*:last:shadow-[inset_-2.5px_2.5px_var(--act),inset_0_-2.5px_var(--act)]';

@@ -4,12 +4,13 @@ import { Table } from '@/app/_ui/table';
 import type { HoursPerson } from '@/modules/hours';
 import type { PersonId } from '@/modules/units';
 import { longestMinutes } from './against-contract';
-import { columnFormat } from './format-hours';
+import { columnFormats } from './format-hours';
 import { HoursFoot } from './hours-foot';
 import { HoursHead } from './hours-head';
 import { HoursRow } from './hours-row';
 import { focusRow } from './place-focus';
 import { rowAfterKey } from './row-keys';
+import { hoursColumns } from './sum-hours';
 
 interface Props {
   /** The rows. */
@@ -33,7 +34,7 @@ export function HoursTable({ people, everybody, isFiltered, chosenId, ...props }
   const [focusedId, setFocusedId] = useState<PersonId | null>(null);
   const stop = people.find(({ personId }) => personId === focusedId) ?? people[0];
   const longest = longestMinutes(everybody);
-  const format = columnFormat(everybody.flatMap(minutesOf));
+  const formats = columnFormats(hoursColumns, everybody);
   const onKeyDown = (event: KeyboardEvent, index: number) => {
     if (event.key === 'Escape') return props.onClose();
     const next = people[rowAfterKey(event.key, index, people.length) ?? -1];
@@ -52,7 +53,7 @@ export function HoursTable({ people, everybody, isFiltered, chosenId, ...props }
               key={person.personId}
               person={person}
               longest={longest}
-              format={format}
+              formats={formats}
               isTabStop={person === stop}
               isChosen={person.personId === chosenId}
               panelId={props.panelId}
@@ -62,7 +63,7 @@ export function HoursTable({ people, everybody, isFiltered, chosenId, ...props }
             />
           ))}
         </tbody>
-        <HoursFoot people={people} isFiltered={isFiltered} format={format} />
+        <HoursFoot people={people} isFiltered={isFiltered} formats={formats} />
       </Table>
       <p className="mt-2 text-note text-ink2 phone:hidden" data-print="off">
         Among the names <KeyCap>↑↓</KeyCap> <KeyCap>Home</KeyCap> <KeyCap>End</KeyCap> move,{' '}
@@ -71,13 +72,3 @@ export function HoursTable({ people, everybody, isFiltered, chosenId, ...props }
     </>
   );
 }
-
-const minutesOf = (person: HoursPerson): number[] => [
-  person.contractMinutes,
-  person.plannedMinutes,
-  person.workedMinutes,
-  person.nightMinutes,
-  person.weekendMinutes,
-  person.holidayMinutes,
-  person.leaveMinutes,
-];

@@ -1,8 +1,7 @@
 import { Button } from '@/app/_ui/button';
-import { Table } from '@/app/_ui/table';
 import type { HoursPerson } from '@/modules/hours';
 import { againstContract } from './against-contract';
-import { DayRow } from './day-row';
+import { DaysTable } from './days-table';
 import { columnFormat, signed } from './format-hours';
 
 interface Props {
@@ -14,16 +13,7 @@ interface Props {
 
 /** The days behind one person's figures. */
 export function PersonDays({ person, id, onClose }: Props) {
-  const { days } = person;
-  const format = columnFormat(
-    days.flatMap((day) => [
-      day.plannedMinutes,
-      day.workedMinutes ?? 0,
-      day.nightMinutes,
-      day.weekendMinutes,
-      day.holidayMinutes,
-    ]),
-  );
+  const { days, differenceMinutes } = person;
   return (
     <section
       aria-labelledby={id}
@@ -45,49 +35,17 @@ export function PersonDays({ person, id, onClose }: Props) {
       {days.length === 0 ? (
         <p className="text-body">Nothing is planned or worked in these dates.</p>
       ) : (
-        <Table label={`Days of ${person.name}`} maxHeight="34rem">
-          <DaysHead />
-          <tbody>
-            {days.map((day) => (
-              <DayRow key={day.date} day={day} format={format} />
-            ))}
-          </tbody>
-          <tfoot>
-            <tr>
-              <th scope="row">{days.length === 1 ? '1 day' : `${days.length} days`}</th>
-              <td data-figure>{format(person.plannedMinutes)}</td>
-              <td data-figure>{format(person.workedMinutes)}</td>
-              <td data-figure>{format(person.nightMinutes)}</td>
-              <td data-figure>{format(person.weekendMinutes)}</td>
-              <td data-figure>{format(person.holidayMinutes)}</td>
-            </tr>
-          </tfoot>
-        </Table>
+        <DaysTable person={person} />
       )}
-      {person.differenceMinutes === 0 ? null : (
+      {differenceMinutes === 0 ? null : (
         <p className="mt-2 text-second text-ink2">
           Worked less planned, on the days with a record:{' '}
           <strong className="font-[660] text-ink">
-            {signed(person.differenceMinutes, format)} h
+            {signed(differenceMinutes, columnFormat([differenceMinutes]))} h
           </strong>
           .
         </p>
       )}
     </section>
-  );
-}
-
-function DaysHead() {
-  return (
-    <thead>
-      <tr>
-        <th scope="col">Day, shift, post</th>
-        {['Planned', 'Worked', 'Night', 'Weekend', 'Holiday'].map((head) => (
-          <th key={head} scope="col" data-figure>
-            {head}
-          </th>
-        ))}
-      </tr>
-    </thead>
   );
 }

@@ -9,12 +9,12 @@ import { countDays, sumPeople } from './sum-hours';
 export function standingFigures({ from, to, today, people }: HoursView): StandingFigure[] {
   const { plannedMinutes, workedMinutes } = sumPeople(people);
   const { days, recorded } = countDays(people);
-  const format = columnFormat([plannedMinutes, workedMinutes]);
+  const hours = (minutes: number) => `${columnFormat([minutes])(minutes)} h`;
   return [
     { label: 'Dates', value: dateRangeWithYear(from, to) },
     { label: 'People', value: people.length },
-    { label: 'Planned', value: `${format(plannedMinutes)} h` },
-    { label: 'Worked', value: `${format(workedMinutes)} h` },
+    { label: 'Planned', value: hours(plannedMinutes) },
+    { label: 'Worked', value: hours(workedMinutes) },
     { label: 'Work recorded', value: `${recorded} of ${days} days` },
     { label: 'As of', value: formatDay(today), isLast: true },
   ];

@@ -1,31 +1,28 @@
 import type { HoursPerson } from '@/modules/hours';
+import type { FormatHours } from './format-hours';
 
-/** What is added up at the foot of the table. */
-export interface HoursSums {
-  readonly contractMinutes: number;
-  readonly plannedMinutes: number;
-  readonly workedMinutes: number;
-  readonly differenceMinutes: number;
-  readonly nightMinutes: number;
-  readonly weekendMinutes: number;
-  readonly holidayMinutes: number;
-  readonly leaveMinutes: number;
-}
+/** The columns of figures of the table, in order; each is added up at its foot. */
+export const hoursColumns = [
+  'contractMinutes',
+  'plannedMinutes',
+  'workedMinutes',
+  'differenceMinutes',
+  'nightMinutes',
+  'weekendMinutes',
+  'holidayMinutes',
+  'leaveMinutes',
+] as const satisfies readonly (keyof HoursPerson)[];
+export type HoursColumn = (typeof hoursColumns)[number];
+export type HoursFormats = Readonly<Record<HoursColumn, FormatHours>>;
+export type HoursSums = Readonly<Record<HoursColumn, number>>;
 
 /** Totals over people, in minutes. */
 export function sumPeople(people: readonly HoursPerson[]): HoursSums {
-  const sum = (minutesOf: (person: HoursPerson) => number) =>
-    people.reduce((total, person) => total + minutesOf(person), 0);
-  return {
-    contractMinutes: sum((person) => person.contractMinutes),
-    plannedMinutes: sum((person) => person.plannedMinutes),
-    workedMinutes: sum((person) => person.workedMinutes),
-    differenceMinutes: sum((person) => person.differenceMinutes),
-    nightMinutes: sum((person) => person.nightMinutes),
-    weekendMinutes: sum((person) => person.weekendMinutes),
-    holidayMinutes: sum((person) => person.holidayMinutes),
-    leaveMinutes: sum((person) => person.leaveMinutes),
-  };
+  const sums = hoursColumns.map((column) => [
+    column,
+    people.reduce((total, person) => total + person[column], 0),
+  ]);
+  return Object.fromEntries(sums) as HoursSums;
 }
 
 /** Whether worked time differs from the plan on any day, also where the differences cancel out. */

@@ -1,9 +1,9 @@
-import { blockTimes, endsNote, inSentence } from '@/app/_ui/calendar/block-words';
+import { blockTimes, endsNote } from '@/app/_ui/calendar/block-words';
 import { hours } from '@/app/_ui/clock';
 import { restAround } from '@/app/_ui/people-grid/rest-around';
 import type { OwnShift, OwnShifts } from '@/modules/roster';
 import { formatDay, type LocalDate } from '@/modules/units';
-import { withNames } from '../with-names';
+import { postWords } from '../post-words';
 import { ownPeriodOn } from './own-frame';
 
 interface Props {
@@ -52,10 +52,8 @@ function ShiftWords({
         {formatDay(shift.date)}, {shift.kindName}
       </h2>
       <p>
-        {[blockTimes(shift), ends, hours(shift.paidMinutes), inSentence(shift.skillName)]
-          .filter(Boolean)
-          .join(', ')}
-        . {withNames(shift).replace(/^w/, 'W')}.
+        {[blockTimes(shift), ends, hours(shift.paidMinutes)].filter(Boolean).join(', ')}.{' '}
+        {postWords(shift)}.
       </p>
       <p className="text-second text-ink2">{rest.join(' ')}</p>
     </>

@@ -23,7 +23,7 @@ export function MonthView({ own, first }: Props) {
   const frame = ownFrame(own);
   const place = useCalendarPlace(own.today);
   const [chosen, setChosen] = useState<LocalDate>(own.today);
-  const { data, error, refetch } = useEntries('me/calendar', place.range, first);
+  const { data, error, refetch } = useEntries('me/calendar', place.readRange, first);
   const selected = place.view === 'day' ? place.date : chosen;
   const period = ownPeriodOn(own, selected);
   const pick = (date: LocalDate) => {

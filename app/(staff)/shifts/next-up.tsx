@@ -4,7 +4,7 @@ import { DayLine } from '@/app/_ui/day-line';
 import { Verdict } from '@/app/_ui/verdict';
 import type { OwnPeriod, OwnShift, OwnShifts } from '@/modules/roster';
 import { addDays, formatClock, formatDay } from '@/modules/units';
-import { withNames } from '../with-names';
+import { postWords } from '../post-words';
 import { findNextShift, nextShiftTitle } from './next-shift';
 
 interface Props {
@@ -24,7 +24,7 @@ export function NextUp({ own, periods }: Props) {
   }
   return (
     <>
-      <Verdict lead={`${nextTimes(next.shift)}. ${sentence(withNames(next.shift))}.`}>
+      <Verdict lead={`${nextTimes(next.shift)}. ${postWords(next.shift)}.`}>
         {nextShiftTitle(next, own.today)}
       </Verdict>
       <DayLine
@@ -48,5 +48,3 @@ function nextTimes(shift: OwnShift): string {
   const endDay = weekdayName(addDays(date, Math.floor(endMinute / 1440)));
   return `${day}, ${formatClock(startMinute)} to ${endDay} ${formatClock(endMinute)}`;
 }
-
-const sentence = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);

@@ -2,7 +2,7 @@ import { blockTimes, endsNote } from '@/app/_ui/calendar/block-words';
 import { dayNumber, longDay, weekdayName } from '@/app/_ui/clock';
 import { DayLine } from '@/app/_ui/day-line';
 import type { OwnShift } from '@/modules/roster';
-import { withNames } from '../with-names';
+import { postWords } from '../post-words';
 
 interface Props {
   readonly shift: OwnShift;
@@ -38,13 +38,8 @@ export function ShiftLine({ shift, dayStartsAtMinute, holidayName, isToday, isPa
           ) : null}
         </p>
         <DayLine shift={shift} dayStartsAtMinute={dayStartsAtMinute} className="my-1 max-w-100" />
-        <p className="text-second text-ink2">
-          {shift.skillName}, {asPart(withNames(shift))}
-        </p>
+        <p className="text-second text-ink2">{postWords(shift)}</p>
       </div>
     </li>
   );
 }
-
-/** Continues a sentence: `you are the only nurse on this shift`. */
-const asPart = (words: string): string => words.replace(/^You/, 'you');

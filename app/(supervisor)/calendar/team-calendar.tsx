@@ -23,7 +23,7 @@ interface Props {
 export function TeamCalendar({ team, frame, first, teamChoice }: Props) {
   const place = useCalendarPlace(frame.today);
   const [choice, setChoice] = useState<Choice>(everything);
-  const { data, error, refetch } = useEntries(`teams/${team.id}/calendar`, place.range, first);
+  const { data, error, refetch } = useEntries(`teams/${team.id}/calendar`, place.readRange, first);
   return (
     <>
       <Verdict

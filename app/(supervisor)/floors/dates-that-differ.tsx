@@ -1,3 +1,4 @@
+import { useRef } from 'react';
 import { Button } from '@/app/_ui/button';
 import { ProblemNote } from '@/app/_ui/problem-note';
 import { SectionHead } from '@/app/_ui/section-head';
@@ -15,9 +16,22 @@ interface Props {
 
 /** Dates of the period on which floors differ from the weekly pattern, with the reason. */
 export function DatesThatDiffer({ dates, onAdd, onChange, onClear, problem }: Props) {
+  const addButton = useRef<HTMLButtonElement>(null);
+  const clear = (difference: Difference) => {
+    // The line goes away with its buttons: the keyboard needs another place.
+    addButton.current?.focus();
+    onClear(difference);
+  };
   return (
     <section aria-labelledby="dates-head">
-      <SectionHead id="dates-head" aside={<Button onClick={onAdd}>Add a date…</Button>}>
+      <SectionHead
+        id="dates-head"
+        aside={
+          <Button ref={addButton} onClick={onAdd}>
+            Add a date…
+          </Button>
+        }
+      >
         Dates that differ
       </SectionHead>
       {dates.length === 0 ? (
@@ -34,7 +48,7 @@ export function DatesThatDiffer({ dates, onAdd, onChange, onClear, problem }: Pr
                   key={difference.row.floor.id}
                   difference={difference}
                   onChange={() => onChange(difference)}
-                  onClear={() => onClear(difference)}
+                  onClear={() => clear(difference)}
                 />
               ))}
             </div>
@@ -56,8 +70,8 @@ function DifferenceLine({ difference, onChange, onClear }: LineProps) {
   const { row, entry, usual } = difference;
   const name = differenceName(difference);
   return (
-    <div className="flex flex-wrap items-baseline justify-between gap-x-4">
-      <p>
+    <div className="flex items-baseline justify-between gap-x-4 phone:flex-wrap">
+      <p className="min-w-0 flex-1 phone:basis-full">
         {row.skillName} {row.kind?.name ?? row.times} {usual} to{' '}
         <span className="font-[660]">{entry.people}</span>
         {entry.reason ? <span className="text-ink2">, {entry.reason}</span> : null}

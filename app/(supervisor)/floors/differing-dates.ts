@@ -1,5 +1,4 @@
-import type { FloorDate, Holiday } from '@/modules/coverage';
-import { holidayColumn } from '@/modules/coverage';
+import { type FloorDate, type Holiday, holidayColumn } from '@/modules/coverage';
 import { formatDay, type LocalDate, weekdayOf } from '@/modules/units';
 import { type FloorRow, rowName } from './floor-rows';
 

@@ -1,6 +1,7 @@
 import { KindMark } from '@/app/_ui/kind-mark';
 import type { Tone } from '@/modules/coverage';
 import type { FloorRow } from './floor-rows';
+import { topLine } from './top-line';
 
 interface Props {
   readonly row: FloorRow;
@@ -8,21 +9,22 @@ interface Props {
   readonly tone: Tone | null;
 }
 
+/** A hairline that leaves out the column of the skills. */
+const skillGap =
+  'before:absolute before:-top-px before:right-0 before:left-[4.75rem] before:h-px before:bg-rule phone:before:left-0';
+
 /** Head of a row: the skill once for its group, the shift by name and hours, and what sets it apart. */
 export function FloorRowHead({ row, tone }: Props) {
   const { kind, times, marks, skillName, isFirstOfSkill } = row;
   return (
     <th
       scope="row"
-      className="sticky left-0 z-2 bg-paper p-0 text-left font-normal phone:align-top"
+      className={`sticky left-0 z-2 bg-paper p-0 text-left font-normal ${isFirstOfSkill ? topLine(row) : skillGap}`}
     >
-      <div
-        className={`flex h-full items-center phone:flex-col phone:items-start phone:py-1 ${
-          isFirstOfSkill ? 'border-t-[1.5px] border-ink' : ''
-        }`}
-      >
+      <div className="flex items-center phone:flex-col phone:items-start phone:py-1">
         <span
-          className={`w-[4.75rem] shrink-0 truncate font-[660] phone:w-auto ${isFirstOfSkill ? '' : 'sr-only desk:not-sr-only desk:invisible'}`}
+          // Named once for the eye, on every row for screen readers.
+          className={`shrink-0 truncate font-[660] desk:w-[4.75rem] ${isFirstOfSkill ? '' : 'phone:sr-only desk:opacity-0'}`}
         >
           {skillName}
         </span>

@@ -1,3 +1,4 @@
+import { useRef } from 'react';
 import { ProblemNote } from '@/app/_ui/problem-note';
 import { type Coverage, isInForce } from '@/modules/coverage';
 import { addDays, formatDay } from '@/modules/units';
@@ -24,6 +25,13 @@ export interface SheetParts {
 /** The drawing of a normal week above the table, or what to do while there are no floors. */
 export function FloorsPart({ coverage, period, rows, needs, edits, onOpen }: SheetParts) {
   const { team, skills, kinds } = coverage;
+  const part = useRef<HTMLElement>(null);
+  const place = {
+    ref: part,
+    tabIndex: -1,
+    'aria-label': 'Weekly pattern',
+    className: 'min-w-0 outline-none',
+  };
   const steps = normalWeek(
     rows.map(({ floor }) => floor),
     skills.map(({ id }) => id),
@@ -40,21 +48,26 @@ export function FloorsPart({ coverage, period, rows, needs, edits, onOpen }: She
   const dayBefore = addDays(period.startsOn, -1);
   if (rows.length === 0) {
     return (
-      <div>
+      <section {...place}>
         {drawing}
         <NoFloors
           period={period}
+          dayBefore={dayBefore}
           hasFloorsBefore={needs.floors.some((floor) => isInForce(floor, dayBefore))}
-          onContinue={() => edits.carryOn.mutate({ from: dayBefore, to: period.endsOn })}
+          onContinue={() => {
+            // The button gives way to the table: the keyboard needs another place.
+            part.current?.focus();
+            edits.carryOn.mutate({ from: dayBefore, to: period.endsOn });
+          }}
           onAdd={() => onOpen({ kind: 'floor', floor: null })}
           isSaving={edits.carryOn.isPending}
           problem={edits.carryOn.error}
         />
-      </div>
+      </section>
     );
   }
   return (
-    <div>
+    <section {...place}>
       <FloorsTable
         rows={rows}
         kinds={kinds}
@@ -65,7 +78,7 @@ export function FloorsPart({ coverage, period, rows, needs, edits, onOpen }: She
       </FloorsTable>
       <p className="mt-1 text-second text-ink2">{sayReach(rows, period)}</p>
       <ProblemNote problem={edits.remove.error} kept="The floor is as it was." />
-    </div>
+    </section>
   );
 }
 

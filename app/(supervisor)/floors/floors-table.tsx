@@ -6,11 +6,12 @@ import { ProblemNote } from '@/app/_ui/problem-note';
 import { type Floor, type ShiftKind, toneOf } from '@/modules/coverage';
 import { weekdayNames } from '@/modules/units';
 import { FloorRowHead } from './floor-row-head';
-import { type FloorRow, rowName } from './floor-rows';
+import type { FloorRow } from './floor-rows';
 import { GridHints } from './grid-hints';
 import { buttonColumn, numberColumns } from './grid-selection';
 import { GridToolbar } from './grid-toolbar';
 import { NumberCell } from './number-cell';
+import { TypedProblem } from './number-editor';
 import { RowButton } from './row-button';
 import { useFloorGrid } from './use-floor-grid';
 import type { FloorNeedsState } from './use-floor-needs';
@@ -41,7 +42,7 @@ export function FloorsTable({ rows, kinds, needs, onChange, children }: Props) {
             role="grid"
             aria-label="Least people on duty, by floor and weekday"
             aria-multiselectable
-            className="w-full table-fixed border-collapse text-body"
+            className="w-full table-fixed border-collapse border-b border-rule text-body"
           >
             <GridHead />
             <tbody>
@@ -59,8 +60,8 @@ export function FloorsTable({ rows, kinds, needs, onChange, children }: Props) {
                   ))}
                   <RowButton
                     grid={grid}
+                    row={row}
                     place={{ row: index, column: buttonColumn }}
-                    name={rowName(row)}
                     onPress={() => onChange(row.floor)}
                   />
                 </tr>
@@ -70,9 +71,10 @@ export function FloorsTable({ rows, kinds, needs, onChange, children }: Props) {
         </div>
       </div>
       <div className="mt-2 grid gap-2">
+        <TypedProblem typed={grid.typing.typed} />
         <ProblemNote
           problem={needs.problem}
-          kept="The numbers you typed are kept in the table."
+          kept="Numbers that are not saved are marked with ! in the table."
           action={
             <div className="flex flex-wrap gap-2">
               <Button onClick={needs.sendAgain}>Save again</Button>

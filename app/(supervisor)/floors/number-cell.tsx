@@ -5,6 +5,7 @@ import { cellName, type FloorRow } from './floor-rows';
 import { readKey } from './grid-keys';
 import { type GridPlace, isInside } from './grid-selection';
 import { NumberEditor } from './number-editor';
+import { topLine } from './top-line';
 import { type FloorGrid, hasRange, runCommand } from './use-floor-grid';
 import type { CellState } from './use-floor-needs';
 
@@ -43,7 +44,7 @@ export function NumberCell({ grid, row, place, state }: Props) {
       aria-selected={isSelected}
       data-place={typed ? undefined : `${place.row} ${place.column}`}
       tabIndex={isActive && !typed ? 0 : -1}
-      className={cellClass(place.column, people, isActive, isSelected, state)}
+      className={`${topLine(row)} ${cellClass(place.column, people, isActive, isSelected, state)}`}
       // While a number is typed its field has the keys and the pointer.
       {...(typed ? {} : handlers)}
     >
@@ -99,7 +100,7 @@ function cellClass(
     unsaved: 'outline-2 outline-dashed outline-short -outline-offset-2 text-short',
   }[state];
   return [
-    'relative cursor-cell border-b border-rule p-0 text-center select-none touch-manipulation',
+    'relative cursor-cell p-0 text-center select-none touch-manipulation',
     column === 7 ? 'border-l border-l-ink' : '',
     isActive ? 'z-1 bg-lift outline-[2.5px] outline-act -outline-offset-2' : ground,
     isActive && state === 'saved' ? '' : lines,

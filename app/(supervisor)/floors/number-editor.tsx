@@ -1,6 +1,6 @@
 'use client';
 
-import { type KeyboardEvent, useId, useLayoutEffect, useRef } from 'react';
+import { type KeyboardEvent, useLayoutEffect, useRef } from 'react';
 import { readFinishingKey } from './grid-keys';
 import type { FloorGrid } from './use-floor-grid';
 import type { Typed } from './use-typing';
@@ -12,10 +12,11 @@ interface Props {
   readonly name: string;
 }
 
+const typedProblemId = 'typed-problem';
+
 /** The field inside a cell while its number is typed. Leaving it saves, Escape does not. */
 export function NumberEditor({ grid, typed, name }: Props) {
   const field = useRef<HTMLInputElement>(null);
-  const problemId = useId();
   useLayoutEffect(() => {
     field.current?.focus();
     if (typed.isOpened) field.current?.select();
@@ -28,31 +29,30 @@ export function NumberEditor({ grid, typed, name }: Props) {
     grid.finish(step);
   };
   return (
-    <>
-      <input
-        ref={field}
-        type="text"
-        inputMode="numeric"
-        autoComplete="off"
-        aria-label={name}
-        aria-invalid={typed.problem ? true : undefined}
-        aria-describedby={typed.problem ? problemId : undefined}
-        value={typed.text}
-        onChange={(event) => grid.typing.type(event.target.value)}
-        onKeyDown={onKeyDown}
-        onBlur={() => grid.finish(null)}
-        className="h-8 w-full bg-lift text-center font-[660] outline-[2.5px]! outline-act! outline-offset-[-2.5px]! aria-invalid:outline-short! phone:h-11 phone:text-[1rem]"
-      />
-      {typed.problem ? (
-        <p
-          id={problemId}
-          role="alert"
-          className="absolute top-full right-0 z-2 w-56 border-[1.25px] border-short bg-paper p-2 text-left text-second font-[640] text-short"
-        >
-          <span aria-hidden="true">! </span>
-          {typed.problem}
-        </p>
-      ) : null}
-    </>
+    <input
+      ref={field}
+      type="text"
+      inputMode="numeric"
+      autoComplete="off"
+      aria-label={name}
+      aria-invalid={typed.problem ? true : undefined}
+      aria-describedby={typed.problem ? typedProblemId : undefined}
+      value={typed.text}
+      onChange={(event) => grid.typing.type(event.target.value)}
+      onKeyDown={onKeyDown}
+      onBlur={() => grid.finish(null)}
+      className="h-8 w-full bg-lift text-center font-[660] outline-[2.5px]! outline-act! outline-offset-[-2.5px]! aria-invalid:outline-short! phone:h-11 phone:text-[1rem]"
+    />
+  );
+}
+
+/** Below the table, where no edge cuts it off: why a typed number was not taken. */
+export function TypedProblem({ typed }: { readonly typed: Typed | null }) {
+  if (!typed?.problem) return null;
+  return (
+    <p id={typedProblemId} role="alert" className="font-[640] text-short">
+      <span aria-hidden="true">! </span>
+      {typed.text}: {typed.problem}
+    </p>
   );
 }

@@ -20,7 +20,7 @@ export function standingFigures(
     hours(minutes),
   ];
   return [
-    { label: 'Floors', value: parts.join(', ') },
+    { label: 'Floors', value: rows.length > 0 ? parts.join(', ') : 'none yet' },
     {
       label: inPeriod.length > 1 ? 'Public holidays' : 'Public holiday',
       value: inPeriod.map(({ date, name }) => `${formatDay(date)}, ${name}`).join('; ') || 'none',

@@ -28,7 +28,7 @@ export function useFloorGrid(rows: readonly FloorRow[], save: FloorNeedsState['s
   const floors = rows.map(({ floor }) => floor);
   const edits = useNeedEdits(rows, save);
   const typing = useTyping((people) => edits.make(setPeople(floors, selectOne(active), people)));
-  const { table, takeFocus } = useGridFocus(active);
+  const { table, takeFocus } = useGridFocus(active, rows.length);
   const move = (step: GridStep, isExtending: boolean) => {
     setSelection(moveBy(selection, step, rows.length, isExtending));
     takeFocus();
@@ -91,11 +91,18 @@ export function runCommand(grid: FloorGrid, command: GridCommand): void {
 /** Whether more than one cell of the grid is selected. */
 export const hasRange = ({ selection }: FloorGrid): boolean => isRange(selection);
 
-/** Puts the keyboard on the active place after the next drawing, when asked to. */
-function useGridFocus({ row, column }: GridPlace) {
+/**
+ * Puts the keyboard on the active place after the next drawing: when asked to, and when the row that had
+ * it is gone.
+ */
+function useGridFocus({ row, column }: GridPlace, rowCount: number) {
   const table = useRef<HTMLTableElement>(null);
   const isWanted = useRef(false);
+  const rowsBefore = useRef(rowCount);
   useLayoutEffect(() => {
+    const isLost = rowCount < rowsBefore.current && document.activeElement === document.body;
+    isWanted.current ||= isLost;
+    rowsBefore.current = rowCount;
     if (!isWanted.current) return;
     isWanted.current = false;
     table.current?.querySelector<HTMLElement>(`[data-place="${row} ${column}"]`)?.focus();

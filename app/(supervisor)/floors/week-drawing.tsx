@@ -26,7 +26,7 @@ const days = Array.from({ length: 7 }, (_, day) => ({ isWeekend: day > 4 }));
 export function WeekDrawing({ steps, dayStartsAtMinute, hasFloors }: Props) {
   const [isTable, setTable] = useState(false);
   const strip = useRef<HTMLDivElement>(null);
-  const width = useWidth(strip, widthBeforeMeasuring);
+  const width = useWidth(strip) ?? widthBeforeMeasuring;
   const state = hasFloors ? 'cover' : 'no-floors';
   const drawing = layOut({ steps, shortages: [], edges, width, height, state });
   const words = hasFloors

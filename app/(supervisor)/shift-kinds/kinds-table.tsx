@@ -38,7 +38,7 @@ export function KindsTable({ coverage, onChange, onRetire }: Props) {
           </th>
         </tr>
       </thead>
-      <tbody className="[&_td]:whitespace-nowrap">
+      <tbody className="[&_td]:whitespace-nowrap [&>tr>*]:align-middle!">
         {kinds.map((kind) => (
           <tr key={kind.id}>
             <th scope="row">

@@ -60,30 +60,41 @@ interface CellChoicesProps extends CellText {
   readonly field: ComponentProps<'input'>;
 }
 
-/** Several choices side by side in a cell, each with its letters above its box. */
+/** Several choices side by side in a cell. The column's head shows their letters: `ChoiceLetters`. */
 export function CellChoices({ label, error, choices, field }: CellChoicesProps) {
   const { control, notes } = useCell({ label, error });
   return (
-    <fieldset
-      aria-label={control['aria-label']}
-      aria-describedby={control['aria-describedby']}
-      className="min-w-max"
-    >
-      <div className="flex">
+    <fieldset aria-label={label} aria-describedby={control['aria-describedby']}>
+      <div className="relative top-[0.4375rem] mb-2 flex">
         {choices.map((choice) => (
-          <label key={choice.value} className="grid w-7 place-items-center text-note phone:w-9">
-            {choice.label}
+          <div key={choice.value} className={choiceClass}>
             <input
               type="checkbox"
               {...field}
               value={choice.value}
+              aria-label={choice.label}
               aria-invalid={control['aria-invalid']}
               className="size-6 accent-act"
             />
-          </label>
+          </div>
         ))}
       </div>
       {notes}
     </fieldset>
   );
 }
+
+/** The letters of `CellChoices`, each above its boxes. */
+export function ChoiceLetters({ choices }: Pick<CellChoicesProps, 'choices'>) {
+  return (
+    <span aria-hidden="true" className="flex font-normal text-ink3">
+      {choices.map(({ value, label }) => (
+        <span key={value} className={choiceClass}>
+          {label.slice(0, 2)}
+        </span>
+      ))}
+    </span>
+  );
+}
+
+const choiceClass = 'grid w-7 shrink-0 place-items-center phone:w-9';

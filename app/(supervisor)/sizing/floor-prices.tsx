@@ -17,7 +17,7 @@ interface Props {
 export function FloorPrices({ sizing, skills, format }: Props) {
   const { answer, problem } = sizing;
   return (
-    <section>
+    <section className="min-w-0">
       <SectionHead>What one more costs on each floor</SectionHead>
       <p className="mb-2 text-second text-ink2">
         From the linear relaxation: an estimate for whole people. Where seated floors of one skill
@@ -26,7 +26,6 @@ export function FloorPrices({ sizing, skills, format }: Props) {
       <Table label="What one more costs on each floor" maxHeight="32rem">
         <thead>
           <tr>
-            <th scope="col">Day</th>
             <th scope="col">Window</th>
             <th scope="col">Skill</th>
             <th scope="col" data-figure>
@@ -40,8 +39,12 @@ export function FloorPrices({ sizing, skills, format }: Props) {
         <tbody>
           {problem.floors.map((floor, index) => (
             <tr key={`${floor.floorId} ${floor.startMinute}`}>
-              <th scope="row">{weekdayNames[floor.weekday]}</th>
-              <td className="figures">{clockRange(floor.startMinute, floor.endMinute)}</td>
+              <th scope="row" className="whitespace-nowrap">
+                {weekdayNames[floor.weekday]}{' '}
+                <span className="figures font-normal">
+                  {clockRange(floor.startMinute, floor.endMinute)}
+                </span>
+              </th>
               <td>{skillName(floor.skillId, skills, 'Anybody')}</td>
               <td data-figure>{floor.people}</td>
               <td data-figure>{format(answer.floorPrices[index]?.price ?? 0)}</td>

@@ -1,17 +1,14 @@
 import { formatMoney } from '@/modules/units';
 
-/** People with at most two places, e.g. `22.33`. */
+/** People with at most two places, e.g. `22.33`; the solver's rounding leaves no "-0". */
 export const formatPeople = (people: number): string =>
-  people.toLocaleString('en-GB', { maximumFractionDigits: 2 });
+  (Math.round(people * 100) / 100 + 0).toLocaleString('en-GB');
 
-/** An amount; minor units only where there are any. */
-export const formatPay = (cents: number, currency: string): string =>
-  formatMoney(
-    cents,
-    currency,
-    'en-GB',
-    Math.round(cents) % 100 === 0 && Number.isInteger(cents) ? 0 : 2,
-  );
+/** An amount to the nearest cent; minor units only where there are any. */
+export function formatPay(cents: number, currency: string): string {
+  const whole = Math.round(cents) + 0;
+  return formatMoney(whole, currency, 'en-GB', whole % 100 === 0 ? 0 : 2);
+}
 
 /** How the values of a sizing are written: with their unit. */
 export const formatValue =

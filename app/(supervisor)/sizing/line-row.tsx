@@ -14,24 +14,8 @@ interface Props {
   readonly onRemove: () => void;
 }
 
-const firstDays = weekdayNames.map((name, weekday) => ({
-  value: String(weekday),
-  label: name.slice(0, 2),
-}));
-
-/** The columns of the table behind the first, in order; hint stands under the head. */
-export const lineColumns = [
-  { head: 'Shift kind', hint: '' },
-  { head: 'Skill', hint: '' },
-  { head: 'Days on', hint: 'in a row' },
-  { head: 'First days', hint: 'of the run' },
-  { head: 'Pay, weekday', hint: 'for a day worked' },
-  { head: 'Pay, Saturday', hint: '' },
-  { head: 'Pay, Sunday', hint: '' },
-  { head: 'Pay, extra day', hint: 'beyond 5 in a row' },
-  { head: 'Most people', hint: 'empty: no limit' },
-  { head: 'Most, %', hint: 'of everybody' },
-] as const;
+/** The weekdays on which a run of days may begin. */
+export const firstDays = weekdayNames.map((label, weekday) => ({ value: String(weekday), label }));
 
 /** One line of the table: a pattern of work, every cell a field of its own. */
 export function LineRow({ index, kinds, skills, onRemove }: Props) {
@@ -48,10 +32,10 @@ export function LineRow({ index, kinds, skills, onRemove }: Props) {
   return (
     <tr>
       <th scope="row">
-        <CellInput {...cell('name', 'Pattern')} maxLength={60} className="w-44 phone:w-36" />
+        <CellInput {...cell('name', 'Pattern')} maxLength={60} className="w-36" />
       </th>
       <td>
-        <CellSelect {...cell('shiftKindId', 'Shift kind')} className="w-44">
+        <CellSelect {...cell('shiftKindId', 'Shift kind')} className="w-48">
           {kinds.map((kind) => (
             <option key={kind.id} value={kind.id}>
               {kind.name} {clockRange(kind.startMinute, kind.endMinute)}
@@ -60,7 +44,7 @@ export function LineRow({ index, kinds, skills, onRemove }: Props) {
         </CellSelect>
       </td>
       <td>
-        <CellSelect {...cell('skillId', 'Skill')} className="w-32">
+        <CellSelect {...cell('skillId', 'Skill')} className="w-28">
           <option value="">None</option>
           {skills.map((skill) => (
             <option key={skill.id} value={skill.id}>
@@ -70,7 +54,7 @@ export function LineRow({ index, kinds, skills, onRemove }: Props) {
         </CellSelect>
       </td>
       <td>
-        <CellInput {...cell('daysOn', 'Days on')} inputMode="numeric" className="w-14" />
+        <CellInput {...cell('daysOn', 'Days on')} inputMode="numeric" className="w-12" />
       </td>
       <td>
         <CellChoices label={label} error={error} choices={firstDays} field={days} />
@@ -79,35 +63,35 @@ export function LineRow({ index, kinds, skills, onRemove }: Props) {
         <CellInput
           {...cell('weekdayCents', 'Pay of a weekday')}
           inputMode="decimal"
-          className="w-24"
+          className="w-20"
         />
       </td>
       <td>
         <CellInput
           {...cell('saturdayCents', 'Pay of a Saturday')}
           inputMode="decimal"
-          className="w-24"
+          className="w-20"
         />
       </td>
       <td>
         <CellInput
           {...cell('sundayCents', 'Pay of a Sunday')}
           inputMode="decimal"
-          className="w-24"
+          className="w-20"
         />
       </td>
       <td>
         <CellInput
           {...cell('extraDayCents', 'Pay of an extra day')}
           inputMode="decimal"
-          className="w-24"
+          className="w-20"
         />
       </td>
       <td>
-        <CellInput {...cell('mostPeople', 'Most people')} inputMode="numeric" className="w-20" />
+        <CellInput {...cell('mostPeople', 'Most people')} inputMode="numeric" className="w-16" />
       </td>
       <td>
-        <CellInput {...cell('mostPercent', 'Most percent')} inputMode="numeric" className="w-16" />
+        <CellInput {...cell('mostPercent', 'Most percent')} inputMode="numeric" className="w-14" />
       </td>
       <td>
         <Button look="quiet" onClick={onRemove} aria-label={`Remove ${line}`}>

@@ -5,7 +5,8 @@ import { AskDialog } from '@/app/_ui/dialog';
 import { Table } from '@/app/_ui/table';
 import type { ShiftKind } from '@/modules/coverage';
 import type { Skill } from '@/modules/people';
-import { LineRow, lineColumns } from './line-row';
+import { LineRow } from './line-row';
+import { LinesHead } from './lines-head';
 import { emptyLine, type SizingForm } from './sizing-form';
 
 interface Props {
@@ -20,24 +21,13 @@ export function LinesTable({ kinds, skills, onStartAgain }: Props) {
   const { fields, append, remove } = useFieldArray({ control, name: 'lines', keyName: 'key' });
   const [isAsking, setAsking] = useState(false);
   const addButton = useRef<HTMLButtonElement>(null);
+  const addLine = () =>
+    append(emptyLine(getValues('lines'), kinds), { focusName: `lines.${fields.length}.name` });
   const problem = formState.errors.lines?.root?.message ?? formState.errors.lines?.message;
   return (
     <>
       <Table label="Patterns people may work">
-        <thead>
-          <tr>
-            <th scope="col">Pattern</th>
-            {lineColumns.map(({ head, hint }) => (
-              <th key={head} scope="col">
-                {head}
-                <span className="block font-normal text-ink3">{hint}</span>
-              </th>
-            ))}
-            <th scope="col">
-              <span className="sr-only">Remove</span>
-            </th>
-          </tr>
-        </thead>
+        <LinesHead />
         <tbody>
           {fields.map((field, index) => (
             <LineRow
@@ -59,7 +49,7 @@ export function LinesTable({ kinds, skills, onStartAgain }: Props) {
         </p>
       ) : null}
       <div className="mt-3 flex flex-wrap gap-2">
-        <Button ref={addButton} onClick={() => append(emptyLine(getValues('lines'), kinds))}>
+        <Button ref={addButton} onClick={addLine}>
           Add a pattern
         </Button>
         <Button onClick={() => setAsking(true)}>Start again from the floors…</Button>

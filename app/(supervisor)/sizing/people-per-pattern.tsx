@@ -19,7 +19,7 @@ export function PeoplePerPattern({ sizing, skills, currency }: Props) {
     return pattern ? [{ pattern, count }] : [];
   });
   return (
-    <section>
+    <section className="min-w-0">
       <SectionHead>People per pattern</SectionHead>
       <p className="mb-2 text-second text-ink2">
         Other splits may be as good; patterns without people are left out.

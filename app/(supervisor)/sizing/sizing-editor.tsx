@@ -20,6 +20,7 @@ interface Props {
   /** The table made from the floors. */
   readonly beginning: SizingInput;
   readonly onSize: (input: SizingInput) => Promise<unknown>;
+  readonly onStartAgain: () => void;
   readonly problem: unknown;
 }
 
@@ -31,6 +32,7 @@ export function SizingEditor({
   start,
   beginning,
   onSize,
+  onStartAgain,
   problem,
 }: Props) {
   const form = useForm<SizingForm, unknown, SizingInput>({
@@ -59,7 +61,10 @@ export function SizingEditor({
         <LinesTable
           kinds={kinds}
           skills={skills}
-          onStartAgain={() => form.reset(toForm(beginning))}
+          onStartAgain={() => {
+            form.reset(toForm(beginning));
+            onStartAgain();
+          }}
         />
         <div className="mt-5 mb-4 flex flex-wrap items-center gap-4">
           <Button type="submit" look="primary" disabled={isSubmitting}>

@@ -51,6 +51,7 @@ export function SizingSheetView({ sheet, teamChoice }: Props) {
         start={latest?.input ?? beginning}
         beginning={beginning}
         onSize={sizing.mutateAsync}
+        onStartAgain={sizing.reset}
         problem={sizing.error}
       />
       {latest ? <Answer sizing={latest} skills={skills} currency={team.currency} /> : null}

@@ -22,6 +22,7 @@ interface Props {
   readonly view: View;
   readonly blocks: readonly Block[];
   readonly world: CalendarWorld;
+  readonly isRead: boolean;
 }
 
 /* English weeks begin on Monday. */
@@ -38,7 +39,7 @@ const components: Components<CalendarEvent> = {
  * The views of react-big-calendar in our look. It lays out months, weeks, days and the agenda; what stands
  * in them is ours: cells of the month as buttons, blocks placed by the team's clock.
  */
-export default function BigCalendar({ view, blocks, world }: Props) {
+export default function BigCalendar({ view, blocks, world, isRead }: Props) {
   const { frame, date, selected, onPick } = world;
   const events = useMemo(
     () => toEvents(blocks, frame.dayStartsAtMinute),
@@ -69,7 +70,7 @@ export default function BigCalendar({ view, blocks, world }: Props) {
           const minute = loaded.minute + Math.floor((performance.now() - loaded.at) / 60_000);
           return wallDate(frame.today, view === 'month' ? minute : minute - start);
         }}
-        messages={{ noEventsInRange: 'No shifts on these days.' }}
+        messages={{ noEventsInRange: isRead ? 'No shifts on these days.' : '' }}
       />
     </CalendarWorldProvider>
   );

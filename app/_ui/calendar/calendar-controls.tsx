@@ -45,15 +45,16 @@ export function CalendarControls({ place, today }: Props) {
           ›
         </Button>
       </div>
+      <Button onClick={() => place.setTable(!isTable)} aria-keyshortcuts="T">
+        {isTable ? 'Show as calendar' : 'Show as table'}
+      </Button>
       <ChoiceBar
         label="View"
+        className="phone:w-full"
         choices={views.map((value) => ({ value, label: viewNames[value] }))}
         value={view}
         onChange={(next) => place.show(next, date)}
       />
-      <Button onClick={() => place.setTable(!isTable)} aria-keyshortcuts="T">
-        {isTable ? 'Show as calendar' : 'Show as table'}
-      </Button>
     </>
   );
 }

@@ -51,7 +51,12 @@ export function CalendarSheet({ place, entries, problem, onRetry, children, ...r
           data-audience={audience}
           data-view={view}
         >
-          <LazyCalendar view={view} blocks={shown} world={{ ...rest, date, range, blocksOn }} />
+          <LazyCalendar
+            view={view}
+            blocks={shown}
+            isRead={entries !== null}
+            world={{ ...rest, date, range, blocksOn }}
+          />
         </section>
       )}
       {children}

@@ -5,7 +5,7 @@ import type { LocalDate } from '@/modules/units';
 import { dayNumber } from '../clock';
 import { DayLine } from '../day-line';
 import { KindMark } from '../kind-mark';
-import { isDraft, ownDaySentence, teamDaySentence } from './block-words';
+import { blockTimes, isDraft, ownDaySentence, teamDaySentence } from './block-words';
 import type { Block } from './blocks';
 import { type CalendarWorld, useCalendarWorld } from './calendar-world';
 import { periodOn } from './period-edges';
@@ -64,7 +64,9 @@ function OwnShifts({
       {isLeave ? <span className="block text-note">leave</span> : null}
       {blocks.map((block) => (
         <span key={block.id} className="block">
-          <span className="block truncate text-note">{block.kindName}</span>
+          <span className="block truncate text-note">
+            {block.kindName} <span className="text-ink2 phone:hidden">{blockTimes(block)}</span>
+          </span>
           <DayLine shift={block} dayStartsAtMinute={frame.dayStartsAtMinute} />
         </span>
       ))}
@@ -81,7 +83,7 @@ function Counts({ blocks }: { readonly blocks: readonly Block[] }) {
       {shown.map((block) => (
         <span key={block.id} className="flex items-center gap-1.5 py-px text-note">
           <KindMark kind={block} tone={block.tone} />
-          <span className="min-w-0 flex-1 truncate phone:hidden">{block.kindName}</span>
+          <span className="min-w-0 truncate phone:hidden">{block.kindName}</span>
           <span className="font-[660]">{block.entries.length}</span>
         </span>
       ))}

@@ -2,7 +2,7 @@
 
 import type { AgendaDateProps, AgendaTimeProps, HeaderProps } from 'react-big-calendar';
 import { formatDay } from '@/modules/units';
-import { longDay } from '../clock';
+import { dayNumber, longDay, monthName, weekdayName } from '../clock';
 import { blockTimes, endsNote } from './block-words';
 import type { PlacedBlock } from './calendar-events';
 import { useCalendarWorld } from './calendar-world';
@@ -25,7 +25,10 @@ export function DayHead({ date: moment }: HeaderProps) {
   return (
     <span className="block">
       <span className="sr-only">{longDay(date)}</span>
-      <span aria-hidden="true">{formatDay(date)}</span>
+      <span aria-hidden="true">
+        {weekdayName(date)} {dayNumber(date)}
+        <span className="phone:hidden"> {monthName(date).slice(0, 3)}</span>
+      </span>
       {date === frame.today ? <span className="block text-act">today</span> : null}
       {holiday ? <span className="block font-normal">{holiday.name}</span> : null}
     </span>

@@ -97,11 +97,13 @@ export function AgendaBlock({ event }: { readonly event: CalendarEvent }) {
             , {lines.map(({ post }) => post).join(', ')}
           </span>
         ) : (
-          lines.map(({ post, names }) => (
-            <p key={post} className="text-second">
-              <span className="font-[660]">{post}</span> {names.join(', ')}
-            </p>
-          ))
+          <div className="flex flex-wrap gap-x-5 text-second">
+            {lines.map(({ post, names }) => (
+              <p key={post}>
+                <span className="font-[660]">{post}</span> {names.join(', ')}
+              </p>
+            ))}
+          </div>
         )}
       </div>
     </div>

@@ -3,13 +3,15 @@
 import { useState } from 'react';
 import type { DateRange, LocalDate } from '@/modules/units';
 import { useAnnounce } from '../live-region';
-import { rangeOf, stepFrom, titleOf, type View } from './view-range';
+import { rangeOf, readRangeOf, stepFrom, titleOf, type View } from './view-range';
 
 /** What a calendar shows: a view around a date, as a drawing or as a table. */
 export interface CalendarPlace {
   readonly view: View;
   readonly date: LocalDate;
   readonly range: DateRange;
+  /** The dates to read: the range and more. */
+  readonly readRange: DateRange;
   readonly title: string;
   readonly isTable: boolean;
   readonly show: (view: View, date: LocalDate) => void;
@@ -32,6 +34,7 @@ export function useCalendarPlace(start: LocalDate): CalendarPlace {
     view,
     date,
     range: rangeOf(view, date),
+    readRange: readRangeOf(view, date),
     title: titleOf(view, date),
     isTable,
     show,

@@ -24,6 +24,16 @@ export function rangeOf(view: View, date: LocalDate): DateRange {
   }
 }
 
+/**
+ * The dates to read for a view: whole months, so that the weeks and days of a month that was read need no
+ * reading of their own.
+ */
+export function readRangeOf(view: View, date: LocalDate): DateRange {
+  if (view === 'month') return rangeOf(view, date);
+  const { from, to } = rangeOf(view, date);
+  return { from: rangeOf('month', from).from, to: rangeOf('month', to).to };
+}
+
 /** The date to show after one step back (-1) or on (1). A month is entered on its first day. */
 export function stepFrom(view: View, date: LocalDate, step: 1 | -1): LocalDate {
   switch (view) {

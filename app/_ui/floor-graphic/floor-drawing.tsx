@@ -10,20 +10,23 @@ interface Props {
   /** Read in place of the picture; left out where the numbers stand beside it. */
   readonly sentence?: string | undefined;
   readonly className?: string;
+  /** Set while the width is only assumed: the drawing is stretched, and words would be too. */
+  readonly isStretched?: boolean;
 }
 
 /**
  * The picture of a floor graphic, in the paint order that keeps the floor line on top. Until its width is
  * known it is stretched to the room it has.
  */
-export function FloorDrawing({ drawing, width, height, bands, sentence, className = '' }: Props) {
+export function FloorDrawing({ drawing, width, height, bands, sentence, ...look }: Props) {
   const hatchId = useId();
   const { baselineY, lineWidth, hatchPitch } = drawing;
+  const labels = look.isStretched ? [] : drawing.labels;
   return (
     <svg
       viewBox={`0 0 ${width} ${height}`}
       preserveAspectRatio="none"
-      className={`block overflow-visible ${className}`}
+      className={`block overflow-visible ${look.className ?? ''}`}
       role={sentence ? 'img' : undefined}
       aria-label={sentence}
       aria-hidden={sentence ? undefined : true}
@@ -44,7 +47,7 @@ export function FloorDrawing({ drawing, width, height, bands, sentence, classNam
         className="stroke-short"
         strokeWidth="1.25"
       />
-      {drawing.labels.map(({ x, y, text }) => (
+      {labels.map(({ x, y, text }) => (
         <text
           key={`${x} ${y}`}
           x={x}
@@ -62,6 +65,7 @@ export function FloorDrawing({ drawing, width, height, bands, sentence, classNam
         className="fill-none stroke-ink"
         strokeWidth={lineWidth}
         strokeLinejoin="miter"
+        vectorEffect="non-scaling-stroke"
       />
     </svg>
   );

@@ -34,7 +34,8 @@ const narrowestHourlyDay = 18;
 export function FloorGraphic(props: Props) {
   const { state, height = 96, whose, callOuts = [] } = props;
   const strip = useRef<HTMLDivElement>(null);
-  const width = useWidth(strip, widthBeforeMeasuring);
+  const measured = useWidth(strip);
+  const width = measured ?? widthBeforeMeasuring;
   const isNarrow = width / Math.max(1, props.days.length) < narrowestHourlyDay;
   const grain = isNarrow ? 'day' : (props.grain ?? 'hour');
   const edges = useMemo(
@@ -59,6 +60,7 @@ export function FloorGraphic(props: Props) {
           bands={weekendBands(props.days, width)}
           sentence={sentence}
           className="h-full w-full"
+          isStretched={measured === null}
         />
         <CallOuts callOuts={callOuts} edges={edges} />
       </div>

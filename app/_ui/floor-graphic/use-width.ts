@@ -6,10 +6,10 @@ const normalTextSize = 16;
 
 /**
  * The width of an element in drawing units, sixteenths of a rem, so that drawings grow with the text:
- * CSS pixels at normal text size. `before` until it has been measured.
+ * CSS pixels at normal text size. Null until it has been measured.
  */
-export function useWidth(element: RefObject<HTMLElement | null>, before: number): number {
-  const [width, setWidth] = useState(before);
+export function useWidth(element: RefObject<HTMLElement | null>): number | null {
+  const [width, setWidth] = useState<number | null>(null);
   useLayoutEffect(() => {
     const node = element.current;
     if (!node) return;

@@ -19,7 +19,7 @@ export function Inspector({ board, row, day }: Props) {
     <section
       aria-label="Inspector"
       data-print="off"
-      className="w-[17rem] shrink-0 border-ink wide:border-l-[1.5px] wide:pl-4 phone:w-full phone:border-t-3 phone:pt-3"
+      className="w-full max-w-[34rem] shrink-0 border-t-3 border-ink pt-3 wide:w-[17rem] wide:border-t-0 wide:border-l-[1.5px] wide:pt-0 wide:pl-4"
     >
       {row && day ? (
         <>

@@ -33,7 +33,7 @@ export function PeopleGrid({ board }: { readonly board: Board }) {
   const [asked, setAsked] = useState<Zoom | null>(null);
   const strip = useRef<HTMLElement>(null);
   const helpId = useId();
-  const stripWidth = useWidth(strip, widthBeforeMeasuring);
+  const stripWidth = useWidth(strip) ?? widthBeforeMeasuring;
   const groups = useMemo(() => groupBoard(board), [board]);
   const frame = useGridFrameOf(board, stripWidth, asked);
   const { days, sizes } = frame;

@@ -19,12 +19,14 @@ interface Props {
 }
 
 const height = 80;
+const widthBeforeMeasuring = 358;
 const daysPerWeek = 7;
 
 /** A week of cover with a button for each day, and steps to the weeks around it. */
 export function WeekStrip({ board, dayIndex, onChoose }: Props) {
   const strip = useRef<HTMLDivElement>(null);
-  const width = useWidth(strip, 358);
+  const measured = useWidth(strip);
+  const width = measured ?? widthBeforeMeasuring;
   const start = dayIndex - (dayIndex % daysPerWeek);
   const week = useMemo(
     () => ({ ...board, days: board.days.slice(start, start + daysPerWeek) }),
@@ -51,6 +53,7 @@ export function WeekStrip({ board, dayIndex, onChoose }: Props) {
           bands={weekendBands(week.days, width)}
           sentence={coverSentence(week, 'all skills', state)}
           className="h-full w-full"
+          isStretched={measured === null}
         />
       </div>
       <div className="line-group flex">

@@ -14,6 +14,8 @@ export interface ShortColumn {
 /** A slice of a floor as a row. */
 export interface FloorRow extends Stretch {
   readonly row: number;
+  readonly skillId: string | null;
+  readonly counting: ProblemFloor['counting'];
   /** People asked for, firm and wished together. */
   readonly people: number;
   readonly covering: readonly WorkColumn[];
@@ -22,7 +24,7 @@ export interface FloorRow extends Stretch {
 }
 
 /** Floors that add up, and who counts for them. */
-interface FloorGroup {
+interface FloorGroup extends Pick<FloorRow, 'skillId' | 'counting'> {
   readonly name: string;
   readonly floors: readonly ProblemFloor[];
   readonly counts: (work: WorkColumn) => boolean;
@@ -46,7 +48,7 @@ export function addFloorRows(
     const coveringOf = (slice: Stretch) =>
       problem.shifts.flatMap((shift) => (holds(shift, slice) ? (onShift[shift.index] ?? []) : []));
     return coverSlices(sliceWindows(group.floors, cuts), coveringOf).map((slice) =>
-      addFloorRow(builder, group.name, slice),
+      addFloorRow(builder, group, slice),
     );
   });
 }
@@ -63,6 +65,8 @@ function groupFloors(problem: Problem): FloorGroup[] {
     );
   const seated = [...problem.skills.map(({ id }) => id), null].map((skillId, index) => ({
     name: skillId === null ? 'any' : `k${index}`,
+    skillId,
+    counting: 'seated' as const,
     floors: asking.filter((floor) => floor.counting === 'seated' && floor.skillId === skillId),
     counts: (work: WorkColumn) => skillId === null || work.postSkillId === skillId,
   }));
@@ -72,6 +76,8 @@ function groupFloors(problem: Problem): FloorGroup[] {
       const who = floor.skillId === null ? null : holders(floor.skillId);
       return {
         name: `shared${index}`,
+        skillId: floor.skillId,
+        counting: 'shared' as const,
         floors: [floor],
         counts: ({ personIndex }: WorkColumn) => who?.has(personIndex) ?? true,
       };
@@ -93,10 +99,10 @@ function worksByShift(
 
 function addFloorRow(
   builder: ModelBuilder,
-  group: string,
+  { name, skillId, counting }: FloorGroup,
   slice: CoveredSlice<ProblemFloor, WorkColumn>,
 ): FloorRow {
-  const place = `${group},${slice.startMinute}`;
+  const place = `${name},${slice.startMinute}`;
   const shorts = neededByPrice(slice.windows).map(([priceCentsPerHour, people]) => ({
     column: addShortColumn(builder, place, slice, priceCentsPerHour, people),
     people,
@@ -109,7 +115,7 @@ function addFloorRow(
   ];
   const row = builder.addRow({ name: `floor(${place})`, lower: people, entries });
   const { startMinute, endMinute, covering } = slice;
-  return { row, startMinute, endMinute, people, covering, shorts };
+  return { row, skillId, counting, startMinute, endMinute, people, covering, shorts };
 }
 
 /** People asked for at each price: wished ones from the cheapest up, then firm ones (null). */

@@ -1,6 +1,7 @@
 import type { Problem } from '../../problem';
+import { payFor } from '../../units';
 import type { ModelBuilder } from '../model-builder';
-import { centsPerMinute, timePay } from '../pay';
+import { centsPerMinute } from '../pay';
 import type { PersonWork } from '../work-columns';
 
 /**
@@ -51,15 +52,14 @@ export function addOvertime(
 }
 
 /**
- * Ordinary pay of people paid by contract is the same for every roster: a constant of the cost. That of
- * people paid by hours stands on their work columns.
+ * Ordinary pay that is the same for every roster is a constant of the cost: the contract of people paid
+ * by contract, the credited leave of people paid by hours, whose worked minutes stand on their columns.
  */
-export function addContractPay(
+export function addConstantPay(
   builder: ModelBuilder,
   problem: Problem,
   { person }: PersonWork,
 ): void {
-  if (person.paidBy === 'contract') {
-    builder.addOffset('cost', timePay(problem, person, 0).ordinary);
-  }
+  const minutes = person.paidBy === 'contract' ? person.contractMinutes : person.creditMinutes;
+  builder.addOffset('cost', payFor(person.payCentsPerHour, minutes));
 }

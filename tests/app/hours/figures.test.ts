@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { columnFormat, signed } from '@/app/(hr)/hours/format-hours';
+import { columnFormat, columnFormats, signed } from '@/app/(hr)/hours/format-hours';
 import { rowAfterKey } from '@/app/(hr)/hours/row-keys';
 import { countDays, hasDifference, isRecorded, sumPeople } from '@/app/(hr)/hours/sum-hours';
 import { day, person } from './people';
@@ -13,13 +13,18 @@ describe('hours of a column', () => {
     expect([480, 450, 455].map(columnFormat([480, 450, 455]))).toEqual(['8.00', '7.50', '7.58']);
   });
 
+  it('are judged column by column, and what is not recorded counts as nothing', () => {
+    const rows = [
+      { planned: 480, worked: null },
+      { planned: 480, worked: 455 },
+    ];
+    const formats = columnFormats(['planned', 'worked'], rows);
+    expect([formats.planned(960), formats.worked(455)]).toEqual(['16', '7.58']);
+  });
+
   it('carry a sign where they are a difference', () => {
     const format = columnFormat([90]);
-    expect([90, -15, 0].map((minutes) => signed(minutes, format))).toEqual([
-      '+1.50',
-      '−0.25',
-      '0.00',
-    ]);
+    expect([90, -15, 0].map((minutes) => signed(minutes, format))).toEqual(['+1.50', '−0.25', '0']);
   });
 });
 

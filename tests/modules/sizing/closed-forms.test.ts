@@ -1,4 +1,4 @@
-import { beforeAll, describe, expect, it } from 'vitest';
+import { beforeAll, describe, expect, it, vi } from 'vitest';
 import type { Floor, ShiftKind } from '@/modules/coverage';
 import { countPeople, line, openTeam, type SizedTeam } from './sized-team';
 
@@ -13,6 +13,9 @@ function randomWeeks(count: number, length: number, most: number): number[][] {
 }
 
 const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0);
+
+/** Many sizings in one test: room for a busy machine. */
+vi.setConfig({ testTimeout: 240_000 });
 
 let team: SizedTeam;
 let day: ShiftKind;

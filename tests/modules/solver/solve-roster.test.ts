@@ -1,0 +1,103 @@
+import { afterAll, expect, it } from 'vitest';
+import { proveRoster } from '@/modules/proof';
+import type { RosterProgress } from '@/modules/solver';
+import { solverPool } from '@/modules/solver/pool';
+import { closeSolver, solveRoster } from '@/modules/solver/server';
+import { demoSizedProblem } from '@/tests/support/demo-sized-problem';
+import { buildFloor, buildProblem } from '@/tests/support/problem-builder';
+
+afterAll(closeSolver);
+
+/** Two nurses and a week of Earlies, which each of them may work four times. */
+const small = buildProblem({
+  people: [
+    { contractMinutes: 1920, maximumMinutes: 1920 },
+    { contractMinutes: 1920, maximumMinutes: 1920 },
+  ],
+  floors: Array.from({ length: 7 }, (_, day) =>
+    buildFloor({ startMinute: day * 1440 + 420, endMinute: day * 1440 + 900 }),
+  ),
+});
+
+it('solves in a thread and reports rosters and progress on the way', async () => {
+  const progress: RosterProgress[] = [];
+  const rosters: number[] = [];
+  const outcome = await solveRoster(small, {
+    limitSeconds: 30,
+    onProgress: (report) => progress.push(report),
+    onRoster: (roster) => rosters.push(roster.length),
+  });
+  expect(outcome).toMatchObject({ kind: 'optimal', shortageMinutes: 0, costCents: 2 * 80_000 });
+  expect(rosters.length).toBeGreaterThan(0);
+  expect(progress.at(-1)).toMatchObject({
+    stage: 2,
+    shortageMinutes: 0,
+    shortageBoundMinutes: 0,
+    bestCostCents: 160_000,
+    boundCents: 160_000,
+  });
+});
+
+/** End Sat 22:00, start Sun 09:00: 10 h of rest on the spring night, so one of the two floors must be short. */
+it('keeps the rest across the clock change, to the hour that is lost', async () => {
+  const kinds = [
+    { id: 'Late', startMinute: 840, endMinute: 1320 },
+    { id: 'Morning', startMinute: 540, endMinute: 1020 },
+  ];
+  const sketch = { zone: 'Europe/Berlin', startsOn: '2026-03-28', dayCount: 2, kinds };
+  const { shifts } = buildProblem(sketch);
+  const floors = [shifts[0], shifts[3]].flatMap((shift) =>
+    shift ? [{ startMinute: shift.startMinute, endMinute: shift.endMinute }] : [],
+  );
+  const spring = await solveRoster(buildProblem({ ...sketch, floors }), { limitSeconds: 30 });
+  expect(spring).toMatchObject({ kind: 'optimal', shortageMinutes: 480 });
+  const autumn = buildProblem({ ...sketch, startsOn: '2026-10-24', floors });
+  const later = autumn.shifts[3];
+  const moved = {
+    ...autumn,
+    floors: autumn.floors.map((floor, index) =>
+      index === 1 && later
+        ? { ...floor, startMinute: later.startMinute, endMinute: later.endMinute }
+        : floor,
+    ),
+  };
+  expect(await solveRoster(moved, { limitSeconds: 30 })).toMatchObject({
+    kind: 'optimal',
+    shortageMinutes: 0,
+  });
+});
+
+it('keeps the best roster, lawful and with honest figures, when it is stopped', async () => {
+  const stop = new AbortController();
+  const problem = demoSizedProblem();
+  const outcome = await solveRoster(problem, {
+    limitSeconds: 50,
+    stop: stop.signal,
+    onRoster: () => stop.abort(),
+  });
+  if (outcome.kind !== 'stopped' || !outcome.best) throw new Error(`ended as ${outcome.kind}`);
+  const { roster, shortageMinutes, costCents, boundCents } = outcome.best;
+  expect(proveRoster(problem, roster)).toMatchObject({ breaches: [], shortageMinutes, costCents });
+  expect(boundCents).toBeLessThanOrEqual(costCents);
+});
+
+it('ends as failed when its thread dies, and the next run has a new one', async () => {
+  const outcome = await solveRoster(demoSizedProblem(), {
+    limitSeconds: 50,
+    onRoster: () => {
+      for (const thread of solverPool().threads) thread.terminate();
+    },
+  });
+  expect(outcome).toMatchObject({ kind: 'failed', cause: expect.any(Error) });
+  expect(await solveRoster(small, { limitSeconds: 30 })).toMatchObject({ kind: 'optimal' });
+});
+
+it('never waits for the solver on the event loop', async () => {
+  let turns = 0;
+  const beat = setInterval(() => {
+    turns += 1;
+  }, 5);
+  await solveRoster(small, { limitSeconds: 30 });
+  clearInterval(beat);
+  expect(turns).toBeGreaterThan(0);
+});
