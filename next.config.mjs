@@ -12,6 +12,8 @@ const config = {
     'ical-generator',
     'papaparse',
   ],
+  /** `npm test` checks the types of everything; a start should not wait for it again. */
+  typescript: { ignoreBuildErrors: true },
   poweredByHeader: false,
 };
 export default config;

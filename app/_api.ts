@@ -45,6 +45,7 @@ async function send(method: string, path: string, body: unknown): Promise<Respon
   try {
     return await fetch(`/api/v1/${path}`, init);
   } catch {
+    if (method === 'GET') throw new ApiProblem(0, 'Not read', 'The connection dropped. Try again.');
     const detail = 'The connection dropped. What you entered is kept here; try again.';
     throw new ApiProblem(0, 'Not saved', detail);
   }

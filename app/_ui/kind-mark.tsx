@@ -1,20 +1,13 @@
 import type { ShiftKind, Tone } from '@/modules/coverage';
+import { brickTones } from './people-grid/brick';
 
 interface Props {
   readonly kind: Pick<ShiftKind, 'letter'>;
   readonly tone: Tone;
 }
 
-const brickClasses = [
-  'bg-(--brick-0) text-(--brick-letter)',
-  'bg-(--brick-1) text-(--brick-letter)',
-  'bg-(--brick-2) text-(--brick-letter)',
-  'bg-(--brick-3) text-(--brick-letter-night)',
-] as const;
-
 /** Fill, letter and outline of a brick; it darkens with lateness in both themes. */
-export const brickClass = (tone: Tone): string =>
-  `border-[1.25px] border-ink ${brickClasses[tone]}`;
+export const brickClass = (tone: Tone): string => `border-[1.25px] border-ink ${brickTones[tone]}`;
 
 /** The letter of a shift kind as a small brick. Decoration: the name stands beside it. */
 export function KindMark({ kind, tone }: Props) {

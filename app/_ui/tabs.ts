@@ -21,7 +21,7 @@ const sheets: readonly Sheet[] = [
   { href: '/roster', label: 'Roster', need: 'rosters.read', barRank: 3 },
   { href: '/runs', label: 'Runs', need: 'rosters.write', barRank: 5 },
   { href: '/sizing', label: 'Sizing', need: 'sizing.run', barRank: 8 },
-  { href: '/calendar', label: 'Calendar', need: 'rosters.write', barRank: 6 },
+  { href: '/calendar', label: 'Calendar', need: 'rosters.read', barRank: 6 },
   { href: '/hours', label: 'Hours', need: 'hours.read', barRank: 7 },
   { href: '/members', label: 'Members', need: 'members.write', barRank: 10 },
   { href: '/mail', label: 'Mail', need: 'mail.read', barRank: 11, isDemoOnly: true },

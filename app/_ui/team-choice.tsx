@@ -1,6 +1,4 @@
-'use client';
-
-import { usePathname, useRouter } from 'next/navigation';
+import { Button } from './button';
 import { SelectField } from './field';
 
 interface Props {
@@ -8,22 +6,21 @@ interface Props {
   readonly teamId: string;
 }
 
-/** Chooses the team of a sheet; nothing is drawn for people with one team. */
+/** Changes the team that a sheet shows; nothing is drawn for people with one team. */
 export function TeamChoice({ teams, teamId }: Props) {
-  const router = useRouter();
-  const pathname = usePathname();
   if (teams.length < 2) return null;
   return (
-    <SelectField
-      label="Team"
-      value={teamId}
-      onChange={(event) => router.push(`${pathname}?team=${event.target.value}`)}
-    >
-      {teams.map(({ id, name }) => (
-        <option key={id} value={id}>
-          {name}
-        </option>
-      ))}
-    </SelectField>
+    <form method="get" className="flex items-end gap-2 pb-2" data-print="off">
+      <SelectField label="Team" name="team" defaultValue={teamId} className="w-56">
+        {teams.map(({ id, name }) => (
+          <option key={id} value={id}>
+            {name}
+          </option>
+        ))}
+      </SelectField>
+      <Button type="submit" className="min-h-9! phone:min-h-11!">
+        Show
+      </Button>
+    </form>
   );
 }

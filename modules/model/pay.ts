@@ -20,8 +20,8 @@ export const overtimeOf = (person: ProblemPerson, workedMinutes: number): number
 
 /**
  * Ordinary pay and overtime pay in cents. Paid by contract: the contract in any case. Paid by hours:
- * the worked minutes and credited leave that are no overtime. Overtime is paid at its percentage of the rate. Each of the
- * two is rounded once for the whole period.
+ * the worked minutes and credited leave that are no overtime. Overtime is paid at its percentage of the
+ * rate. Each of the two is rounded once for the whole period.
  */
 export function timePay(
   { pay }: Problem,

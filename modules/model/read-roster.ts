@@ -124,7 +124,7 @@ export function roundingSlackCents(model: RosterModel): number {
   const isWhole = (centsPerHour: number, minutes: number, percent = 100) =>
     Number.isInteger(centsPerMinute(centsPerHour, percent) * minutes);
   const sums = problem.people.flatMap((person) => {
-    const minutes = greatestDivisor(step, person.contractMinutes - person.creditMinutes);
+    const minutes = [person.contractMinutes, person.creditMinutes].reduce(greatestDivisor, step);
     const overtime = isWhole(person.payCentsPerHour, minutes, problem.pay.overtimePercent);
     return person.paidBy === 'contract'
       ? [overtime]

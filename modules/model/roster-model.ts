@@ -63,7 +63,7 @@ function addPersonRows(
   addNightRow(builder, problem, work);
   addPinRows(builder, work);
   addHoursRow(builder, work);
-  addConstantPay(builder, problem, work);
+  addConstantPay(builder, work);
   return {
     overtime: addOvertime(builder, problem, work),
     weekends: addWeekendRows(builder, problem, work),

@@ -85,11 +85,16 @@ const term = (value: number, name: string): string =>
 function wrap(head: string, terms: readonly string[], tail = ''): string[] {
   const lines: string[] = [];
   for (let from = 0; from < terms.length; from += termsPerLine) {
-    lines.push(`  ${terms.slice(from, from + termsPerLine).join(' ')}`);
+    lines.push(terms.slice(from, from + termsPerLine).join(' '));
   }
-  lines[0] = ` ${head}${lines[0] ?? ''}`;
-  lines[lines.length - 1] += ` ${tail}`;
-  return lines.map((line) => line.trimEnd());
+  return lines.map((line, index) =>
+    [
+      ' ',
+      ...(index === 0 && head ? [head] : []),
+      line,
+      ...(index === lines.length - 1 && tail ? [tail] : []),
+    ].join(' '),
+  );
 }
 
 const safeName = (name: string, prefix: string): string => {

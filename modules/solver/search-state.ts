@@ -112,8 +112,7 @@ export class SearchState {
 
   /** `cents` is a bound of the model's cost, which lies within the slack of the cost in whole cents. */
   raiseCostBound(cents: number): void {
-    const whole = Math.ceil(cents - this.#slackCents - boundToleranceCents);
-    this.#costBound.cents = Math.max(this.#costBound.cents, whole);
+    this.#costBound.cents = Math.max(this.#costBound.cents, this.#wholeCents(cents));
     this.report();
   }
 
@@ -153,9 +152,13 @@ export class SearchState {
     });
   }
 
-  /** No roster costs less than the contracts: every other cost is 0 or more. */
+  /** No roster costs less than the constant of the objective: every other cost is 0 or more. */
   get #leastCents(): number {
-    return objectiveOf(this.#model.linear, 'cost').offset;
+    return this.#wholeCents(objectiveOf(this.#model.linear, 'cost').offset);
+  }
+
+  #wholeCents(bound: number): number {
+    return Math.ceil(bound - this.#slackCents - boundToleranceCents);
   }
 }
 

@@ -23,6 +23,7 @@ const person: fc.Arbitrary<Partial<ProblemPerson>> = fc
     contractMinutes: shifts * 480,
     minimumMinutes: rest.paidBy === 'contract' ? shifts * 480 : 0,
     maximumMinutes: (shifts + overtimeShifts) * 480,
+    creditMinutes: awayOn === null ? 0 : 480,
     absences:
       awayOn === null
         ? []

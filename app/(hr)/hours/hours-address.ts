@@ -1,4 +1,4 @@
-import { type DateRange, dateRangeSchema } from '@/modules/units';
+import { type DateRange, dateRangeSchema, isLocalDate } from '@/modules/units';
 
 /** Which hours are shown. */
 export interface HoursChoice {
@@ -6,7 +6,10 @@ export interface HoursChoice {
   readonly range: DateRange;
 }
 
-/** What an address says of it. `range` is null where its dates cannot be read; `typed` is what stands there. */
+/**
+ * What an address says of it. `range` is null where its dates make none; `typed` is what stands there
+ * for the fields, empty for a date that does not exist: a date field could not show it.
+ */
 export interface HoursAddress {
   readonly teamId: string | null;
   readonly range: DateRange | null;
@@ -21,9 +24,11 @@ export function readAddress(query: URLSearchParams): HoursAddress {
   return {
     teamId: query.get('team'),
     range: range.success ? range.data : null,
-    typed: from === null && to === null ? null : { from: from ?? '', to: to ?? '' },
+    typed: from === null && to === null ? null : { from: fieldText(from), to: fieldText(to) },
   };
 }
+
+const fieldText = (date: string | null): string => (date && isLocalDate(date) ? date : '');
 
 /** The address that shows a choice again. */
 export const addressOf = ({ teamId, range }: HoursChoice): string =>

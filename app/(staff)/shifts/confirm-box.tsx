@@ -20,31 +20,42 @@ const meaning = 'Confirm means: I have seen them. You can still ask for changes.
 
 /** What confirming means, by when, and what follows if not; after it: when it was done. */
 export function ConfirmBox({ period, own, onConfirm, isSending, problem, onReadAgain }: Props) {
-  if (period.confirmedAtUtc !== null) {
-    return (
-      <p className="mt-4 border-l-3 border-holds py-1 pl-3">
-        <strong className="font-[660] text-holds">Confirmed</strong>{' '}
-        {formatInstant(period.confirmedAtUtc, own.zone)}. You can still ask for changes.
-      </p>
-    );
-  }
+  const { confirmedAtUtc } = period;
+  const isDone = confirmedAtUtc !== null;
   return (
-    <div id={confirmId(period)} className="mt-4 border-[1.25px] border-ink p-3">
-      <p>{meaning}</p>
-      <p className="mt-1 text-ink2">{confirmSentence(period, own.today)}</p>
-      <Button look="primary" className="mt-3 phone:w-full" disabled={isSending} onClick={onConfirm}>
-        {isSending ? 'Confirming…' : `Confirm ${counted(period.shifts.length, 'shift')}`}
-      </Button>
-      <div className="mt-2 empty:hidden">
-        <ProblemNote
-          problem={problem}
-          kept="Nothing was confirmed."
-          action={<Button onClick={onReadAgain}>Read my shifts again</Button>}
-        />
-      </div>
+    <div
+      id={confirmId(period)}
+      tabIndex={-1}
+      className={`mt-4 ${isDone ? 'border-l-3 border-holds py-1 pl-3' : 'border-[1.25px] border-ink p-3'}`}
+    >
+      {isDone ? (
+        <p>
+          <strong className="font-[660] text-holds">Confirmed</strong>{' '}
+          {formatInstant(confirmedAtUtc, own.zone)}. You can still ask for changes.
+        </p>
+      ) : (
+        <>
+          <p>{meaning}</p>
+          <p className="mt-1 text-ink2">{confirmSentence(period, own.today)}</p>
+          <Button
+            look="primary"
+            className="mt-3 phone:w-full"
+            disabled={isSending}
+            onClick={onConfirm}
+          >
+            {isSending ? 'Confirming…' : `Confirm ${counted(period.shifts.length, 'shift')}`}
+          </Button>
+          <div className="mt-2 empty:hidden">
+            <ProblemNote
+              problem={problem}
+              action={<Button onClick={onReadAgain}>Read my shifts again</Button>}
+            />
+          </div>
+        </>
+      )}
     </div>
   );
 }
 
-/** Where the question stands, for the link above the list. */
+/** Where the question stands, for the link above the list and for the focus after confirming. */
 export const confirmId = ({ versionId }: OwnPeriod): string => `confirm-${versionId}`;

@@ -6,7 +6,7 @@ import { useAnnounce } from '@/app/_ui/live-region';
 import { TitleBlock } from '@/app/_ui/title-block';
 import type { OwnPeriod, OwnShifts } from '@/modules/roster';
 import { formatClock, formatDay } from '@/modules/units';
-import { ConfirmBox } from './confirm-box';
+import { ConfirmBox, confirmId } from './confirm-box';
 import { NextUp } from './next-up';
 import { periodsAhead } from './order-periods';
 import { PeriodSection } from './period-section';
@@ -25,9 +25,11 @@ export function ShiftsView({ first }: { readonly first: OwnShifts }) {
   const confirming = useMutation({
     mutationFn: ({ versionId }: OwnPeriod) =>
       callApi<OwnShifts>('POST', 'me/confirmations', { versionId }),
-    onSuccess: (answer) => {
+    onSuccess: (answer, period) => {
       client.setQueryData(key, answer);
       announce('Confirmed.');
+      // The button that had the focus goes away.
+      document.getElementById(confirmId(period))?.focus();
     },
   });
   const periods = periodsAhead(own.periods, own.today);

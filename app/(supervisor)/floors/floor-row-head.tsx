@@ -9,9 +9,9 @@ interface Props {
   readonly tone: Tone | null;
 }
 
-/** A hairline that leaves out the column of the skills. */
+/** Covers the hairline above the column of the skills, so that a group reads as one. */
 const skillGap =
-  'before:absolute before:-top-px before:right-0 before:left-[4.75rem] before:h-px before:bg-rule phone:before:left-0';
+  'desk:before:absolute desk:before:-top-px desk:before:left-0 desk:before:h-0.5 desk:before:w-[4.75rem] desk:before:bg-paper';
 
 /** Head of a row: the skill once for its group, the shift by name and hours, and what sets it apart. */
 export function FloorRowHead({ row, tone }: Props) {
@@ -19,9 +19,9 @@ export function FloorRowHead({ row, tone }: Props) {
   return (
     <th
       scope="row"
-      className={`sticky left-0 z-2 bg-paper p-0 text-left font-normal ${isFirstOfSkill ? topLine(row) : skillGap}`}
+      className={`sticky left-0 z-2 bg-paper p-0 text-left font-normal ${topLine(row)} ${isFirstOfSkill ? '' : skillGap}`}
     >
-      <div className="flex items-center phone:flex-col phone:items-start phone:py-1">
+      <div className="flex items-center py-1 phone:flex-col phone:items-start">
         <span
           // Named once for the eye, on every row for screen readers.
           className={`shrink-0 truncate font-[660] desk:w-[4.75rem] ${isFirstOfSkill ? '' : 'phone:sr-only desk:opacity-0'}`}

@@ -56,7 +56,7 @@ export function FloorsSheet(props: Props) {
             <PeriodChoice periods={props.periods} period={period} onChoose={setPeriod} />
             {rows.length > 0 ? (
               <Button
-                className="min-h-9!"
+                className="min-h-9! phone:min-h-11!"
                 onClick={() => openDialog({ kind: 'floor', floor: null })}
               >
                 Add a floor…

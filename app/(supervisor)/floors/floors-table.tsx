@@ -30,10 +30,15 @@ const columns = Array.from({ length: numberColumns }, (_, column) => column);
 /** The weekly pattern of every floor as a grid to type into. */
 export function FloorsTable({ rows, kinds, needs, onChange, children }: Props) {
   const grid = useFloorGrid(rows, needs.save);
+  // The buttons of the problem go away with it: the keyboard goes back to the table.
+  const leaveTo = (solve: () => void) => {
+    grid.takeFocus();
+    solve();
+  };
   return (
     <div>
       <GridToolbar grid={grid} />
-      <div className="overflow-x-auto print:overflow-visible">
+      <div className="relative overflow-x-auto print:overflow-visible">
         <div className="min-w-[44rem] pt-4 phone:min-w-[39rem]">
           {children}
           <table
@@ -77,8 +82,8 @@ export function FloorsTable({ rows, kinds, needs, onChange, children }: Props) {
           kept="Numbers that are not saved are marked with ! in the table."
           action={
             <div className="flex flex-wrap gap-2">
-              <Button onClick={needs.sendAgain}>Save again</Button>
-              <Button onClick={needs.giveUp}>Go back to what is saved</Button>
+              <Button onClick={() => leaveTo(needs.sendAgain)}>Save again</Button>
+              <Button onClick={() => leaveTo(needs.giveUp)}>Go back to what is saved</Button>
             </div>
           }
         />
@@ -92,7 +97,10 @@ function GridHead() {
   return (
     <thead>
       <tr className="border-b-[1.5px] border-ink text-second">
-        <th scope="col" className="w-[15.5rem] pb-1 text-left phone:w-[9.5rem]">
+        <th
+          scope="col"
+          className="sticky left-0 z-2 w-[15.5rem] bg-paper pb-1 text-left phone:w-[9.5rem]"
+        >
           <span className="sr-only">Floor</span>
         </th>
         {weekdayNames.map((name, day) => (

@@ -44,8 +44,8 @@ function Sums({ footing }: { readonly footing: Footing }) {
     <>
       <p className="text-verdict font-[660]">{footingHeadline(footing)}</p>
       <p className="mt-1 max-w-[46rem] text-ink2">
-        The floors need at least {hours(needed)}, contracts give {hours(given)} after leave.{' '}
-        {footingLead(footing)} Rest and leave, day by day, are tested in a run.
+        The floors need at least {hours(needed)} of paid time, contracts give {hours(given)} after
+        leave. {footingLead(footing)} Rest and leave, day by day, are tested in a run.
       </p>
       <div aria-hidden="true" className="mt-3 grid gap-1 pr-2">
         <div style={width(needed)}>

@@ -61,7 +61,7 @@ function usePointing(grid: FloorGrid, place: GridPlace, isActive: boolean) {
     onPointerDown: (event: PointerEvent) => {
       isTouch.current = event.pointerType !== 'mouse';
       if (isTouch.current || event.button !== 0) return;
-      grid.select(place, event.shiftKey || grid.drawsRange);
+      grid.select(place, event.shiftKey);
     },
     onPointerEnter: ({ pointerType, buttons }: PointerEvent) => {
       if (pointerType !== 'mouse' || buttons !== 1 || isActive) return;
@@ -69,10 +69,10 @@ function usePointing(grid: FloorGrid, place: GridPlace, isActive: boolean) {
     },
     // A finger that scrolls never gets here: its pointer is cancelled first.
     onPointerUp: () => {
-      if (isTouch.current) grid.select(place, grid.drawsRange);
+      if (isTouch.current) grid.select(place, false);
     },
     onClick: () => {
-      if (isTouch.current && !grid.drawsRange) grid.open(place, null);
+      if (isTouch.current && grid.drawing === 'off') grid.open(place, null);
     },
     onDoubleClick: () => grid.open(place, null),
   };

@@ -17,7 +17,7 @@ export function standingFigures(
   const parts = [
     ...(shifts > 0 ? [`${shifts.toLocaleString('en-GB')} shifts`] : []),
     ...(windows > 0 ? [`${windows.toLocaleString('en-GB')} other windows`] : []),
-    hours(minutes),
+    `${hours(minutes)} on duty`,
   ];
   return [
     { label: 'Floors', value: rows.length > 0 ? parts.join(', ') : 'none yet' },

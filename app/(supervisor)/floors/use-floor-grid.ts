@@ -19,10 +19,13 @@ import type { FloorNeedsState } from './use-floor-needs';
 import { useNeedEdits } from './use-need-edits';
 import { useTyping } from './use-typing';
 
+/** Drawing a range without keys: off, the next press is its first corner, or its other one. */
+export type RangeDrawing = 'off' | 'begins' | 'grows';
+
 /** Selection, typing, filling and undo of the floors table. */
 export function useFloorGrid(rows: readonly FloorRow[], save: FloorNeedsState['save']) {
   const [chosen, setSelection] = useState(selectOne({ row: 0, column: 0 }));
-  const [drawsRange, setDrawsRange] = useState(false);
+  const [drawing, setDrawing] = useState<RangeDrawing>('off');
   const selection = keepInside(chosen, rows.length);
   const { active } = selection;
   const floors = rows.map(({ floor }) => floor);
@@ -37,7 +40,9 @@ export function useFloorGrid(rows: readonly FloorRow[], save: FloorNeedsState['s
     /** Goes to another cell; what is typed is finished first, and a wrong number is not left. */
     select: (place: GridPlace, isExtending: boolean) => {
       if (typing.typed && !typing.finish()) return;
-      setSelection(isExtending ? extendTo(selection, place) : selectOne(place));
+      const isCorner = isExtending || drawing === 'grows';
+      setSelection(isCorner ? extendTo(selection, place) : selectOne(place));
+      if (drawing === 'begins') setDrawing('grows');
     },
     /** Opens a cell: what stands there, or a text that replaces it. */
     open: (place: GridPlace, text: string | null) => {
@@ -58,7 +63,7 @@ export function useFloorGrid(rows: readonly FloorRow[], save: FloorNeedsState['s
     move,
     collapse: () => setSelection(selectOne(active)),
   };
-  return { table, rows, selection, drawsRange, setDrawsRange, edits, typing, ...actions };
+  return { table, takeFocus, selection, drawing, setDrawing, edits, typing, ...actions };
 }
 
 export type FloorGrid = ReturnType<typeof useFloorGrid>;

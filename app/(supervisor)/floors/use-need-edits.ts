@@ -1,7 +1,7 @@
 'use client';
 
 import { useState } from 'react';
-import { emptyHistory, type HistoryStep, record, redo, undo } from './edit-history';
+import { emptyHistory, forgetOthers, type HistoryStep, record, redo, undo } from './edit-history';
 import type { FloorRow } from './floor-rows';
 import { type NeedChange, toCells } from './need-changes';
 import { sayCells } from './say-cells';
@@ -9,7 +9,8 @@ import type { FloorNeedsState } from './use-floor-needs';
 
 /** Makes changes of the table and takes them back; every step is saved like any other change. */
 export function useNeedEdits(rows: readonly FloorRow[], save: FloorNeedsState['save']) {
-  const [history, setHistory] = useState(emptyHistory);
+  const [kept, setHistory] = useState(emptyHistory);
+  const history = forgetOthers(kept, new Set(rows.map(({ floor }) => floor.id)));
   const step = (to: HistoryStep | null, word: string) => {
     if (!to) return;
     setHistory(to.history);

@@ -35,7 +35,7 @@ export function WeekDrawing({ steps, dayStartsAtMinute, hasFloors }: Props) {
   return (
     <>
       <div className="grid grid-cols-[15.5rem_minmax(0,1fr)_8.75rem] items-end phone:grid-cols-[9.5rem_minmax(0,1fr)_8.75rem]">
-        <div className="sticky left-0 z-2 bg-paper pb-1 text-note text-ink2">
+        <div className="sticky left-0 z-2 bg-paper pr-2 pb-1 text-note text-ink2">
           <p className="text-body font-[660] text-ink">A normal week</p>
           {hasFloors ? (
             <>

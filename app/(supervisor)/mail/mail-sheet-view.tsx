@@ -50,7 +50,9 @@ export function MailSheetView({ mails: atFirst, zone }: Props) {
         </p>
       ) : (
         <div className="grid items-start gap-x-9 gap-y-6 min-[70rem]:grid-cols-2">
-          <MailTable mails={mails} zone={zone} openName={openName} onOpen={open} />
+          <div className="min-w-0 min-[70rem]:sticky min-[70rem]:top-4">
+            <MailTable mails={mails} zone={zone} openName={openName} onOpen={open} />
+          </div>
           {openName ? (
             <OpenMail key={openName} name={openName} zone={zone} headId={headId} onClose={close} />
           ) : (

@@ -2,7 +2,7 @@ import { Button } from '@/app/_ui/button';
 import { Table } from '@/app/_ui/table';
 import type { FakeMailSummary } from '@/modules/mail';
 import type { Zone } from '@/modules/units';
-import { sentWords } from './mail-words';
+import { sentWords, subjectWords } from './mail-words';
 
 interface Props {
   readonly mails: readonly FakeMailSummary[];
@@ -11,14 +11,16 @@ interface Props {
   readonly onOpen: (name: string) => void;
 }
 
-/** To whom, about what, when; each opens in full. */
+/** To whom, about what, when; each opens in full. On phones the subject stands below the address. */
 export function MailTable({ mails, zone, openName, onOpen }: Props) {
   return (
-    <Table label="Mails kept" maxHeight="44rem" holdsFirstColumn={false}>
+    <Table label="Mails kept" maxHeight="calc(100dvh - 7rem)" holdsFirstColumn={false}>
       <thead>
         <tr>
-          <th scope="col">Subject</th>
           <th scope="col">To</th>
+          <th scope="col" className="phone:hidden">
+            Subject
+          </th>
           <th scope="col">Sent</th>
         </tr>
       </thead>
@@ -31,13 +33,14 @@ export function MailTable({ mails, zone, openName, onOpen }: Props) {
                 id={`mail-${name}`}
                 aria-pressed={name === openName}
                 onClick={() => onOpen(name)}
-                className="text-left"
+                className="text-left break-all"
               >
-                {subject || 'No subject'}
+                {to}
               </Button>
+              <span className="block font-normal desk:hidden">{subjectWords(subject)}</span>
             </th>
-            <td>{to}</td>
-            <td className="whitespace-nowrap">{sentWords(sentAtUtc, zone)}</td>
+            <td className="phone:hidden">{subjectWords(subject)}</td>
+            <td className="desk:whitespace-nowrap">{sentWords(sentAtUtc, zone)}</td>
           </tr>
         ))}
       </tbody>

@@ -2,6 +2,9 @@ import { formatInstant } from '@/app/_ui/clock';
 import type { UtcMilliseconds, Zone } from '@/modules/units';
 import { formatClock, formatDay, toLocal } from '@/modules/units';
 
+/** A mail may come without a subject. */
+export const subjectWords = (subject: string): string => subject || 'No subject';
+
 /** When a mail was sent, by the team's clock. */
 export const sentWords = (sentAtUtc: UtcMilliseconds | null, zone: Zone): string =>
   sentAtUtc === null ? 'no date' : formatInstant(sentAtUtc, zone);

@@ -5,7 +5,7 @@ import { ProblemNote } from '@/app/_ui/problem-note';
 import type { FakeMail } from '@/modules/mail';
 import type { Zone } from '@/modules/units';
 import { MailBody } from './mail-body';
-import { sentWords } from './mail-words';
+import { sentWords, subjectWords } from './mail-words';
 
 interface Props {
   readonly name: string;
@@ -30,7 +30,7 @@ export function OpenMail({ name, zone, headId, onClose }: Props) {
     >
       <div className="flex items-start justify-between gap-4">
         <h2 id={headId} tabIndex={-1} className="text-verdict font-[660]">
-          {mail ? mail.subject || 'No subject' : 'Reading mail…'}
+          {mail ? subjectWords(mail.subject) : 'Reading mail…'}
         </h2>
         <Button look="quiet" onClick={onClose}>
           Close
@@ -39,7 +39,7 @@ export function OpenMail({ name, zone, headId, onClose }: Props) {
       <ProblemNote problem={error} />
       {mail ? (
         <>
-          <p className="mb-3 text-second text-ink2">
+          <p className="mt-1 mb-3 text-second text-ink2">
             To {mail.to}, {sentWords(mail.sentAtUtc, zone)}
           </p>
           <MailBody mail={mail} zone={zone} />

@@ -1,10 +1,10 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { requireActor } from '@/app/_session';
+import { chooseTeam } from '@/app/_team';
 import { Shell } from '@/app/_ui/shell';
-import { listTeams } from '@/modules/access/server';
+import { TeamChoice } from '@/app/_ui/team-choice';
 import { readCoverage } from '@/modules/coverage/server';
-import { chooseTeam, TeamChoice } from '../_team-choice';
 import { ShiftKindsSheet } from './shift-kinds-sheet';
 
 export const metadata: Metadata = { title: 'Shift kinds' };
@@ -12,17 +12,15 @@ export const metadata: Metadata = { title: 'Shift kinds' };
 /** The patterns of one day that a team's people work: start, end, break, and who may stand in them. */
 export default async function Page({ searchParams }: PageProps<'/shift-kinds'>) {
   const actor = await requireActor('floors.read');
-  const asked = await searchParams;
-  const teams = listTeams(actor, 'floors.read');
-  const team = chooseTeam(teams, asked.team);
-  const coverage = team ? readCoverage(actor, team.id) : null;
-  if (!team || !coverage?.ok) notFound();
+  const { team, teams } = await chooseTeam(actor, 'floors.read', searchParams);
+  const coverage = readCoverage(actor, team.id);
+  if (!coverage.ok) notFound();
   return (
     <Shell actor={actor}>
       <ShiftKindsSheet
         key={team.id}
         coverage={coverage.value}
-        teamChoice={<TeamChoice teams={teams} team={team} />}
+        teamChoice={<TeamChoice teams={teams} teamId={team.id} />}
       />
     </Shell>
   );

@@ -1,6 +1,6 @@
 'use client';
 
-import { type ReactNode, useState } from 'react';
+import { type ReactNode, useRef, useState } from 'react';
 import { callApi } from '@/app/_api';
 import { Button } from '@/app/_ui/button';
 import { hours } from '@/app/_ui/clock';
@@ -27,6 +27,7 @@ type OpenDialog =
 /** The shift kinds sheet. */
 export function ShiftKindsSheet({ coverage: initial, teamChoice }: Props) {
   const [dialog, setDialog] = useState<OpenDialog | null>(null);
+  const addButton = useRef<HTMLButtonElement>(null);
   const coverage = useCoverage(initial);
   const { save, retire } = useKindChanges(coverage);
   const open = (next: OpenDialog | null) => {
@@ -34,7 +35,7 @@ export function ShiftKindsSheet({ coverage: initial, teamChoice }: Props) {
     setDialog(next);
   };
   const add = (
-    <Button look="primary" onClick={() => open({ kind: 'form', of: null })}>
+    <Button ref={addButton} look="primary" onClick={() => open({ kind: 'form', of: null })}>
       Add a shift kind…
     </Button>
   );
@@ -79,7 +80,10 @@ export function ShiftKindsSheet({ coverage: initial, teamChoice }: Props) {
           confirmLabel="Retire"
           isOpen
           onOpenChange={() => open(null)}
-          onConfirm={() => retire.mutate(dialog.of)}
+          onConfirm={() =>
+            // Its row goes away with its buttons: the keyboard needs another place.
+            retire.mutate(dialog.of, { onSuccess: () => addButton.current?.focus() })
+          }
         >
           New runs offer {dialog.of.name} no more, and its name and letter are free again. Rosters
           made so far keep it. It cannot be brought back; you would add it anew.

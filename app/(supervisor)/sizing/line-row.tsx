@@ -19,16 +19,7 @@ export const firstDays = weekdayNames.map((label, weekday) => ({ value: String(w
 
 /** One line of the table: a pattern of work, every cell a field of its own. */
 export function LineRow({ index, kinds, skills, onRemove }: Props) {
-  const { register, formState } = useFormContext<SizingForm>();
-  const errors = formState.errors.lines?.[index];
-  const name = useWatch<SizingForm, `lines.${number}.name`>({ name: `lines.${index}.name` });
-  const line = name || `pattern ${index + 1}`;
-  const cell = (field: Exclude<keyof LineForm, 'id'>, column: string) => ({
-    ...register(`lines.${index}.${field}`),
-    label: `${column}, ${line}`,
-    error: errors?.[field]?.message,
-  });
-  const { label, error, ...days } = cell('startWeekdays', 'First days');
+  const { line, cell } = useLineCells(index);
   return (
     <tr>
       <th scope="row">
@@ -53,46 +44,7 @@ export function LineRow({ index, kinds, skills, onRemove }: Props) {
           ))}
         </CellSelect>
       </td>
-      <td>
-        <CellInput {...cell('daysOn', 'Days on')} inputMode="numeric" className="w-12" />
-      </td>
-      <td>
-        <CellChoices label={label} error={error} choices={firstDays} field={days} />
-      </td>
-      <td>
-        <CellInput
-          {...cell('weekdayCents', 'Pay of a weekday')}
-          inputMode="decimal"
-          className="w-20"
-        />
-      </td>
-      <td>
-        <CellInput
-          {...cell('saturdayCents', 'Pay of a Saturday')}
-          inputMode="decimal"
-          className="w-20"
-        />
-      </td>
-      <td>
-        <CellInput
-          {...cell('sundayCents', 'Pay of a Sunday')}
-          inputMode="decimal"
-          className="w-20"
-        />
-      </td>
-      <td>
-        <CellInput
-          {...cell('extraDayCents', 'Pay of an extra day')}
-          inputMode="decimal"
-          className="w-20"
-        />
-      </td>
-      <td>
-        <CellInput {...cell('mostPeople', 'Most people')} inputMode="numeric" className="w-16" />
-      </td>
-      <td>
-        <CellInput {...cell('mostPercent', 'Most percent')} inputMode="numeric" className="w-14" />
-      </td>
+      <NumberCells cell={cell} />
       <td>
         <Button look="quiet" onClick={onRemove} aria-label={`Remove ${line}`}>
           Remove
@@ -100,4 +52,55 @@ export function LineRow({ index, kinds, skills, onRemove }: Props) {
       </td>
     </tr>
   );
+}
+
+/** Days, pay and limits of a line. */
+function NumberCells({ cell }: { readonly cell: LineCell }) {
+  const { label, error, ...days } = cell('startWeekdays', 'First day of the run');
+  const count = { inputMode: 'numeric' } as const;
+  const amount = { inputMode: 'decimal', className: 'w-20' } as const;
+  return (
+    <>
+      <td>
+        <CellInput {...cell('daysOn', 'Days on')} {...count} className="w-12" />
+      </td>
+      <td>
+        <CellChoices label={label} error={error} choices={firstDays} field={days} />
+      </td>
+      <td>
+        <CellInput {...cell('weekdayCents', 'Pay of a weekday')} {...amount} />
+      </td>
+      <td>
+        <CellInput {...cell('saturdayCents', 'Pay of a Saturday')} {...amount} />
+      </td>
+      <td>
+        <CellInput {...cell('sundayCents', 'Pay of a Sunday')} {...amount} />
+      </td>
+      <td>
+        <CellInput {...cell('extraDayCents', 'Pay of an extra day')} {...amount} />
+      </td>
+      <td>
+        <CellInput {...cell('mostPeople', 'Most people')} {...count} className="w-16" />
+      </td>
+      <td>
+        <CellInput {...cell('mostPercent', 'Most percent')} {...count} className="w-14" />
+      </td>
+    </>
+  );
+}
+
+type LineCell = ReturnType<typeof useLineCells>['cell'];
+
+/** The name of a line for screen readers, and what a cell of it needs: registration, label and error. */
+function useLineCells(index: number) {
+  const { register, formState } = useFormContext<SizingForm>();
+  const errors = formState.errors.lines?.[index];
+  const name = useWatch<SizingForm, `lines.${number}.name`>({ name: `lines.${index}.name` });
+  const line = name || `pattern ${index + 1}`;
+  const cell = (field: Exclude<keyof LineForm, 'id'>, column: string) => ({
+    ...register(`lines.${index}.${field}`),
+    label: `${column}, ${line}`,
+    error: errors?.[field]?.message,
+  });
+  return { line, cell };
 }

@@ -1,13 +1,14 @@
-import { useRef, useState } from 'react';
+import { useRef } from 'react';
 import { useFieldArray, useFormContext } from 'react-hook-form';
 import { Button } from '@/app/_ui/button';
-import { AskDialog } from '@/app/_ui/dialog';
 import { Table } from '@/app/_ui/table';
 import type { ShiftKind } from '@/modules/coverage';
 import type { Skill } from '@/modules/people';
 import { LineRow } from './line-row';
 import { LinesHead } from './lines-head';
+import { NoLines } from './no-lines';
 import { emptyLine, type SizingForm } from './sizing-form';
+import { StartAgain } from './start-again';
 
 interface Props {
   readonly kinds: readonly ShiftKind[];
@@ -19,30 +20,31 @@ interface Props {
 export function LinesTable({ kinds, skills, onStartAgain }: Props) {
   const { control, getValues, formState } = useFormContext<SizingForm>();
   const { fields, append, remove } = useFieldArray({ control, name: 'lines', keyName: 'key' });
-  const [isAsking, setAsking] = useState(false);
   const addButton = useRef<HTMLButtonElement>(null);
   const addLine = () =>
     append(emptyLine(getValues('lines'), kinds), { focusName: `lines.${fields.length}.name` });
+  const removeLine = (index: number) => {
+    remove(index);
+    addButton.current?.focus();
+  };
   const problem = formState.errors.lines?.root?.message ?? formState.errors.lines?.message;
   return (
     <>
       <Table label="Patterns people may work">
         <LinesHead />
         <tbody>
-          {fields.map((field, index) => (
+          {fields.map(({ key }, index) => (
             <LineRow
-              key={field.key}
+              key={key}
               index={index}
               kinds={kinds}
               skills={skills}
-              onRemove={() => {
-                remove(index);
-                addButton.current?.focus();
-              }}
+              onRemove={() => removeLine(index)}
             />
           ))}
         </tbody>
       </Table>
+      {fields.length === 0 ? <NoLines /> : null}
       {problem ? (
         <p role="alert" className="mt-1 text-second font-[640] text-short">
           {problem}
@@ -52,18 +54,8 @@ export function LinesTable({ kinds, skills, onStartAgain }: Props) {
         <Button ref={addButton} onClick={addLine}>
           Add a pattern
         </Button>
-        <Button onClick={() => setAsking(true)}>Start again from the floors…</Button>
+        <StartAgain onStartAgain={onStartAgain} />
       </div>
-      <AskDialog
-        title="Start again from the floors?"
-        confirmLabel="Start again"
-        isOpen={isAsking}
-        onOpenChange={setAsking}
-        onConfirm={onStartAgain}
-      >
-        The table is filled with five days on and two off for every skill and shift kind the floors
-        of this week ask for. The lines that stand there now are lost.
-      </AskDialog>
     </>
   );
 }

@@ -11,8 +11,9 @@ export function Shortages({ sizing }: { readonly sizing: Sizing }) {
       <span aria-hidden="true" className="hatch mt-1 size-5 shrink-0" />
       <div>
         <p className="text-body font-[660] text-short">
-          At least {formatHours(answer.shortageMinutes)} hours of cover are missing each {cycle}: no
-          number of people on these patterns{within} does better.
+          {answer.isProven ? 'At least ' : 'In the best answer found, '}
+          {formatHours(answer.shortageMinutes)} hours of cover are missing each {cycle}
+          {answer.isProven ? `: no number of people on these patterns${within} does better.` : '.'}
         </p>
         <ul className="mt-1 list-disc pl-5 text-body">
           {answer.shortages.map((shortage) => (
@@ -20,8 +21,8 @@ export function Shortages({ sizing }: { readonly sizing: Sizing }) {
           ))}
         </ul>
         <p className="mt-1 text-second text-ink2">
-          Where the same shortage could stand elsewhere, this is one of the ways. The figures below
-          are the least for exactly this shortage.
+          The same shortage can often stand elsewhere: this is one of the ways. The figures below
+          are for this much shortage.
         </p>
       </div>
     </div>

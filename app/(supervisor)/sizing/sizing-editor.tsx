@@ -35,17 +35,7 @@ export function SizingEditor({
   onStartAgain,
   problem,
 }: Props) {
-  const form = useForm<SizingForm, unknown, SizingInput>({
-    resolver: zodResolver(sizingFormSchema),
-    defaultValues: toForm(start),
-  });
-  const ask = form.handleSubmit(async (input) => {
-    try {
-      await onSize(input);
-    } catch (refusal) {
-      showAtFields(form.setError, refusal);
-    }
-  });
+  const { form, ask } = useSizingForm(start, onSize);
   const { isSubmitting } = form.formState;
   return (
     <FormProvider {...form}>
@@ -75,4 +65,20 @@ export function SizingEditor({
       </form>
     </FormProvider>
   );
+}
+
+/** The form and what submitting it does: read, ask, and show a refusal at the fields it names. */
+function useSizingForm(start: SizingInput, onSize: Props['onSize']) {
+  const form = useForm<SizingForm, unknown, SizingInput>({
+    resolver: zodResolver(sizingFormSchema),
+    defaultValues: toForm(start),
+  });
+  const ask = form.handleSubmit(async (input) => {
+    try {
+      await onSize(input);
+    } catch (refusal) {
+      showAtFields(form.setError, refusal);
+    }
+  });
+  return { form, ask };
 }

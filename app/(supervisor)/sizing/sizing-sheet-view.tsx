@@ -32,16 +32,7 @@ export function SizingSheetView({ sheet, teamChoice }: Props) {
   });
   return (
     <>
-      <Verdict
-        actions={teamChoice}
-        lead={
-          <>
-            How many people, on which shift patterns, the floors of {team.name} take at least cost,
-            before anybody is named. A floor is the least number of people on duty. Sizing looks at
-            a normal week: public holidays, dates that differ and leave are left out.
-          </>
-        }
-      >
+      <Verdict actions={teamChoice} lead={<Lead teamName={team.name} />}>
         Sizing
       </Verdict>
       <SizingEditor
@@ -55,13 +46,30 @@ export function SizingSheetView({ sheet, teamChoice }: Props) {
         problem={sizing.error}
       />
       {latest ? <Answer sizing={latest} skills={skills} currency={team.currency} /> : null}
-      <div className="mt-9">
-        <Caution>
-          A sizing knows no rest times, leave or sickness and is no hiring advice: real teams need
-          more. Floors that protect life come from the authority or the licensed person responsible.
-        </Caution>
-      </div>
+      <Limits />
       <TitleBlock figures={standingFigures(latest, team.zone)} />
     </>
+  );
+}
+
+function Lead({ teamName }: { readonly teamName: string }) {
+  return (
+    <>
+      How many people, on which shift patterns, the floors of {teamName} take at least cost, before
+      anybody is named. A floor is the least number of people on duty. Sizing looks at a normal
+      week: public holidays, dates that differ, clock changes and leave are left out, and wished
+      floors count like firm ones.
+    </>
+  );
+}
+
+function Limits() {
+  return (
+    <div className="mt-9">
+      <Caution>
+        A sizing knows no rest times, leave or sickness and is no hiring advice: real teams need
+        more. Floors that protect life come from the authority or the licensed person responsible.
+      </Caution>
+    </div>
   );
 }

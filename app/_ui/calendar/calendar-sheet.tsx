@@ -1,6 +1,6 @@
 'use client';
 
-import { type KeyboardEvent, type ReactNode, useMemo } from 'react';
+import { type KeyboardEvent, type ReactNode, useMemo, useRef } from 'react';
 import type { CalendarEntry } from '@/modules/roster';
 import { Button } from '../button';
 import { ProblemNote } from '../problem-note';
@@ -28,10 +28,17 @@ export function CalendarSheet({ place, entries, problem, onRetry, children, ...r
   const blocks = useMemo(() => toBlocks(entries ?? [], frame.zone), [entries, frame.zone]);
   const blocksOn = useMemo(() => byDate(blocks), [blocks]);
   const { view, date, range, title, isTable } = place;
+  const sheet = useRef<HTMLDivElement>(null);
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (!isToggleKey(event)) return;
+    place.setTable(!isTable);
+    // What had the focus is about to go away.
+    sheet.current?.focus();
+  };
   const shown = blocks.filter((block) => range.from <= block.date && block.date <= range.to);
   return (
     // biome-ignore lint/a11y/noStaticElementInteractions: T is a short cut to the button above
-    <div onKeyDown={(event) => isToggleKey(event) && place.setTable(!isTable)} className="min-w-0">
+    <div ref={sheet} tabIndex={-1} onKeyDown={onKeyDown} className="min-w-0">
       <ProblemNote problem={problem} action={<Button onClick={onRetry}>Read again</Button>} />
       {entries === null && !problem ? (
         <p className="late-words text-second text-ink2">Reading {title}…</p>

@@ -1,6 +1,7 @@
 import type { CoverLane } from '@/modules/roster';
 import type { CoverStep, Stretch } from './cover-steps';
 import { toColumn } from './day-axis';
+import { courseLines, rectangles, type Scale, stepLine } from './paths';
 
 /** What a floor graphic shows: cover, floors without a roster, or neither yet. */
 export type GraphicState = 'cover' | 'no-roster' | 'no-floors';
@@ -92,8 +93,6 @@ export function layOut(input: DrawingInput): Drawing {
 export const highestStack = (steps: readonly CoverStep[]): number =>
   steps.reduce((most, { need, spare }) => Math.max(most, need + spare), 0);
 
-type Scale = (value: number) => number;
-
 const round = (value: number): number => Math.round(value * 100) / 100;
 
 function lineWidthFor(height: number): number {
@@ -101,63 +100,10 @@ function lineWidthFor(height: number): number {
   return height > 90 ? 3 : 2.5;
 }
 
-/** One closed box for each unbroken stretch with the same lower and upper edge. */
-function rectangles(
-  steps: readonly CoverStep[],
-  from: (step: CoverStep) => number,
-  to: (step: CoverStep) => number,
-  x: Scale,
-  y: Scale,
-): string {
-  const boxes: { start: number; end: number; low: number; high: number }[] = [];
-  for (const step of steps) {
-    const box = { start: step.startMinute, end: step.endMinute, low: from(step), high: to(step) };
-    if (box.high <= box.low || x(box.start) === x(box.end)) continue;
-    const last = boxes.at(-1);
-    if (last && last.end === box.start && last.low === box.low && last.high === box.high) {
-      last.end = box.end;
-    } else {
-      boxes.push(box);
-    }
-  }
-  return boxes
-    .map(({ start, end, low, high }) => `M${x(start)} ${y(low)}V${y(high)}H${x(end)}V${y(low)}Z`)
-    .join('');
-}
-
-/** A hairline at every whole person inside the covered part, broken where cover is lower. */
-function courseLines(steps: readonly CoverStep[], x: Scale, y: Scale): string {
-  const most = steps.reduce((highest, { hold }) => Math.max(highest, hold), 0);
-  const lines: string[] = [];
-  for (let people = 1; people < most; people += 1) {
-    let start: number | null = null;
-    for (const step of [...steps, null]) {
-      const isInside = step !== null && step.hold > people;
-      if (isInside && start === null) start = step.startMinute;
-      if (!isInside && start !== null) {
-        const end = step?.startMinute ?? steps.at(-1)?.endMinute ?? start;
-        lines.push(`M${x(start)} ${y(people)}H${x(end)}`);
-        start = null;
-      }
-    }
-  }
-  return lines.join('');
-}
-
-function stepLine(steps: readonly CoverStep[], x: Scale, y: Scale): string {
-  let path = '';
-  let level: number | null = null;
-  for (const { startMinute, endMinute, need } of steps) {
-    if (x(startMinute) === x(endMinute)) continue;
-    if (level === null) path = `M${x(startMinute)} ${y(need)}`;
-    else if (level !== need) path += `V${y(need)}`;
-    path += `H${x(endMinute)}`;
-    level = need;
-  }
-  return path;
-}
-
-/** Labels stand above the floor line; one that would touch the label before it moves up a row. */
+/**
+ * Labels stand above everything within their width, so that the line of a neighbour never crosses them;
+ * one that would touch the label before it moves up a row.
+ */
 function placeLabels(
   shortages: readonly Stretch[],
   steps: readonly CoverStep[],
@@ -168,12 +114,12 @@ function placeLabels(
   for (const { startMinute, endMinute, people } of [...shortages].sort(
     (one, other) => one.startMinute - other.startMinute,
   )) {
-    const over = steps.filter(
-      (step) => step.startMinute < endMinute && step.endMinute > startMinute,
-    );
-    const ceiling = over.reduce((most, { need, spare }) => Math.max(most, need + spare), 0);
-    const place = round((x(startMinute) + x(endMinute)) / 2);
     if (x(startMinute) === x(endMinute)) continue;
+    const place = round((x(startMinute) + x(endMinute)) / 2);
+    const [left, right] = [place - labelWidth / 2, place + labelWidth / 2];
+    const ceiling = highestStack(
+      steps.filter((step) => x(step.startMinute) < right && x(step.endMinute) > left),
+    );
     let top = y(ceiling) - labelGap;
     const last = labels.at(-1);
     if (last && place - last.x < labelWidth && Math.abs(top - last.y) < labelRow) {

@@ -18,7 +18,8 @@ interface Props extends BrickLook {
   readonly style?: React.CSSProperties;
 }
 
-const tones = [
+/** Fill and letter of a brick by its tone. */
+export const brickTones = [
   'bg-(--brick-0) text-(--brick-letter)',
   'bg-(--brick-1) text-(--brick-letter)',
   'bg-(--brick-2) text-(--brick-letter)',
@@ -27,14 +28,13 @@ const tones = [
 
 /** One shift: tone by lateness, letter inside. Decoration; the cell around it is labelled in full. */
 export function Brick({ kind, letter, times, className = '', style, ...look }: Props) {
-  const tone = look.isPale ? 'bg-transparent text-ink3' : tones[kind.tone];
-  const line = look.isPale ? 'border-edge' : 'border-ink';
-  const dash = look.isSecondSkill ? `border-dashed ${kind.tone === 3 ? innerDash : ''}` : '';
   return (
     <span
       aria-hidden="true"
       style={style}
-      className={`figures flex flex-col items-center justify-center border-[1.25px] text-note leading-none font-[760] ${tone} ${line} ${dash} ${look.isPinned ? 'border-b-3' : ''} ${className}`}
+      className={`figures flex flex-col items-center justify-center border-[1.25px] text-note leading-none font-[760] ${
+        look.isPale ? 'bg-transparent text-ink3' : brickTones[kind.tone]
+      } ${outline(kind.tone, look)} ${look.isPinned ? 'border-b-3' : ''} ${className}`}
     >
       {letter}
       {times ? <span className="mt-0.5 text-[0.6875rem] font-[560]">{times}</span> : null}
@@ -42,5 +42,9 @@ export function Brick({ kind, letter, times, className = '', style, ...look }: P
   );
 }
 
-/** On a dark brick the dashed outline would be ink on ink, so a second one runs inside. */
-const innerDash = 'outline-1 -outline-offset-3 outline-dashed outline-(--brick-letter-night)';
+/** On a dark brick dashes in ink would be ink on ink: they take the colour of the letter. */
+function outline(tone: BoardKind['tone'], { isPale, isSecondSkill }: BrickLook): string {
+  if (isPale) return isSecondSkill ? 'border-dashed border-edge' : 'border-edge';
+  if (!isSecondSkill) return 'border-ink';
+  return `border-dashed ${tone === 3 ? 'border-(--brick-letter-night)' : 'border-ink'}`;
+}

@@ -35,3 +35,9 @@ export function columnSizes(stripWidth: number, columns: number, asked: Zoom | n
     rowHeight: isNarrow ? 44 : rowHeights[zoom],
   };
 }
+
+/** Width of names and all days together, in drawing units. */
+export const gridWidth = (
+  { nameWidth, dayWidth }: Pick<ColumnSizes, 'nameWidth' | 'dayWidth'>,
+  columns: number,
+): number => nameWidth + columns * dayWidth;

@@ -1,22 +1,18 @@
 'use client';
 
-import { useEffect, useId, useMemo, useRef, useState } from 'react';
+import { useId, useMemo, useRef, useState } from 'react';
 import type { Board } from '@/modules/roster';
 import { ChoiceBar } from '../choice-bar';
-import { dateRangeWithYear } from '../clock';
 import { columnEdges } from '../floor-graphic';
-import { coverSteps } from '../floor-graphic/cover-steps';
-import { highestStack } from '../floor-graphic/drawing';
 import { inRem, useWidth } from '../floor-graphic/use-width';
 import { Legend } from '../legend';
 import { daysBefore, gridDays, groupBoard } from './board-rows';
 import { columnSizes, type Zoom, zooms } from './day-columns';
 import { type GridFrame, GridFrameProvider } from './grid-context';
-import { GridHead } from './grid-head';
-import { GroupRows } from './group-rows';
+import { GridTable } from './grid-table';
 import { Inspector } from './inspector';
-import { TotalStrip } from './total-strip';
 import { useGridFocus } from './use-grid-focus';
+import { useKeepInView } from './use-keep-in-view';
 
 const widthBeforeMeasuring = 1096;
 const zoomChoices = zooms.map((weeks) => ({
@@ -39,11 +35,7 @@ export function PeopleGrid({ board }: { readonly board: Board }) {
   const { days, sizes } = frame;
   const rows = groups.flatMap((group) => group.rows);
   const focus = useGridFocus(strip, { rows: rows.length, columns: days.length }, noRow);
-  const highest = useMemo(
-    () => Math.max(1, ...board.lanes.map((lane) => highestStack(coverSteps([lane])))),
-    [board.lanes],
-  );
-  useKeepInView(strip, frame, focus.selected?.column ?? null);
+  useKeepInView(strip, days, sizes, focus.selected?.column ?? null);
   const selectedRow = focus.selected ? rows[focus.selected.row] : undefined;
   const selectedDay = focus.selected ? days[focus.selected.column] : undefined;
 
@@ -71,35 +63,7 @@ export function PeopleGrid({ board }: { readonly board: Board }) {
           style={{ scrollPaddingLeft: inRem(sizes.nameWidth) }}
         >
           <GridFrameProvider value={frame}>
-            <table
-              // biome-ignore lint/a11y/noNoninteractiveElementToInteractiveRole: a table of cells to move in is the grid pattern of ARIA
-              role="grid"
-              aria-label={`Roster ${dateRangeWithYear(board.startsOn, board.endsOn)}, people and days`}
-              aria-describedby={helpId}
-              aria-readonly="true"
-              className="table-fixed border-separate border-spacing-0"
-              style={{ width: inRem(gridWidth(sizes, days.length)) }}
-              onKeyDown={focus.onKeyDown}
-              onFocus={focus.onFocus}
-            >
-              <colgroup>
-                <col style={{ width: inRem(sizes.nameWidth) }} />
-                <col span={days.length} style={{ width: inRem(sizes.dayWidth) }} />
-              </colgroup>
-              <thead className="sticky top-0 z-3 bg-paper">
-                <TotalStrip />
-                <GridHead />
-              </thead>
-              {groups.map((group) => (
-                <GroupRows
-                  key={group.name}
-                  group={group}
-                  tabStop={focus.tabStop}
-                  selected={focus.selected}
-                  highest={highest}
-                />
-              ))}
-            </table>
+            <GridTable groups={groups} focus={focus} helpId={helpId} />
           </GridFrameProvider>
         </section>
       </div>
@@ -115,23 +79,3 @@ function useGridFrameOf(board: Board, stripWidth: number, asked: Zoom | null): G
     return { board, days, edges, sizes: columnSizes(stripWidth, days.length, asked) };
   }, [board, stripWidth, asked]);
 }
-
-/** After a change of zoom the selected day, else the first of the period, stands beside the names. */
-function useKeepInView(
-  strip: React.RefObject<HTMLElement | null>,
-  { sizes, days }: GridFrame,
-  selectedColumn: number | null,
-): void {
-  const column = useRef(selectedColumn);
-  column.current = selectedColumn;
-  useEffect(() => {
-    const node = strip.current;
-    if (!node || sizes.zoom === 4) return;
-    const today = days.findIndex(({ isToday, dayIndex }) => isToday && dayIndex >= 0);
-    const shown = column.current ?? (today >= 0 ? today : daysBefore);
-    node.scrollLeft = (node.scrollWidth * (shown * sizes.dayWidth)) / gridWidth(sizes, days.length);
-  }, [strip, sizes, days]);
-}
-
-const gridWidth = (sizes: GridFrame['sizes'], columns: number): number =>
-  sizes.nameWidth + columns * sizes.dayWidth;

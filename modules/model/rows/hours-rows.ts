@@ -54,12 +54,14 @@ export function addOvertime(
 /**
  * Ordinary pay that is the same for every roster is a constant of the cost: the contract of people paid
  * by contract, the credited leave of people paid by hours, whose worked minutes stand on their columns.
+ * Only the first is a sum by itself, and rounded.
  */
-export function addConstantPay(
-  builder: ModelBuilder,
-  problem: Problem,
-  { person }: PersonWork,
-): void {
-  const minutes = person.paidBy === 'contract' ? person.contractMinutes : person.creditMinutes;
-  builder.addOffset('cost', payFor(person.payCentsPerHour, minutes));
+export function addConstantPay(builder: ModelBuilder, { person }: PersonWork): void {
+  const { payCentsPerHour, contractMinutes, creditMinutes } = person;
+  builder.addOffset(
+    'cost',
+    person.paidBy === 'contract'
+      ? payFor(payCentsPerHour, contractMinutes)
+      : centsPerMinute(payCentsPerHour) * creditMinutes,
+  );
 }

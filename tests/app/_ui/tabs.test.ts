@@ -20,7 +20,7 @@ describe('the sheet index', () => {
   it.each<[Role, string[]]>([
     ['supervisor', ['Floors', 'Shift kinds', 'Roster', 'Runs', 'Sizing', 'Calendar']],
     ['staff', ['Shifts', 'Month']],
-    ['hr', ['Roster', 'Hours']],
+    ['hr', ['Roster', 'Calendar', 'Hours']],
     [
       'owner',
       ['Floors', 'Shift kinds', 'Roster', 'Runs', 'Sizing', 'Calendar', 'Hours', 'Members'],
@@ -34,7 +34,7 @@ describe('the sheet index', () => {
   });
 
   it('joins the sheets of several roles', () => {
-    expect(labels(['staff', 'hr'])).toEqual(['Shifts', 'Month', 'Roster', 'Hours']);
+    expect(labels(['staff', 'hr'])).toEqual(['Shifts', 'Month', 'Roster', 'Calendar', 'Hours']);
   });
 
   it('marks a sheet as open on its own pages and on no other', () => {

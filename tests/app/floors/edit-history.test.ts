@@ -1,5 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { emptyHistory, record, redo, undo } from '@/app/(supervisor)/floors/edit-history';
+import {
+  emptyHistory,
+  forgetOthers,
+  record,
+  redo,
+  undo,
+} from '@/app/(supervisor)/floors/edit-history';
 
 const change = (day: number, before: number, after: number) => ({
   floorId: 'flr_1' as const,
@@ -30,5 +36,13 @@ describe('undo and redo', () => {
   it('forget what was undone once something new is done', () => {
     const back = undo(twice);
     expect(back && redo(record(back.history, [change(5, 0, 1)]))).toBeNull();
+  });
+
+  it('forget floors that are gone', () => {
+    const other = { ...change(3, 0, 1), floorId: 'flr_2' as const };
+    const mixed = record(record(twice, [other]), [change(4, 0, 1), other]);
+    const left = forgetOthers(mixed, new Set(['flr_1']));
+    expect(left.done.map((made) => made.length)).toEqual([2, 1, 1]);
+    expect(undo(left)?.cells).toEqual([cell(4, 0)]);
   });
 });

@@ -52,7 +52,7 @@ it('stands at the foot of the sheet with the public holidays', () => {
   };
   const figures = standingFigures(coverage, rowsOf(sampleFloor()), period);
   expect(figures.map(({ value }) => value)).toEqual([
-    '19 shifts, 152 h',
+    '19 shifts, 152 h on duty',
     'Thu 18 Feb, Lantern Day',
   ]);
 });

@@ -15,12 +15,12 @@ describe('the address of the hours', () => {
     expect(hoursPath(choice, '.csv')).toBe('teams/tea_1/hours.csv?from=2027-02-01&to=2027-02-28');
   });
 
-  it('has no range when its dates are wrong, but keeps what stood there', () => {
+  it('has no range when its dates are wrong, but keeps those that exist', () => {
     const query = queryOf({ from: '2027-03-01', to: '2027-02-30' });
     expect(readAddress(query)).toEqual({
       teamId: null,
       range: null,
-      typed: { from: '2027-03-01', to: '2027-02-30' },
+      typed: { from: '2027-03-01', to: '' },
     });
   });
 

@@ -63,8 +63,6 @@ const person: fc.Arbitrary<Partial<ProblemPerson>> = fc
   })
   .map(({ pin, ...rest }) => ({
     ...rest,
-    // Whether leave of people paid by the hour is paid is not for this test.
-    creditMinutes: rest.paidBy === 'hours' ? 0 : rest.creditMinutes,
     pins: pin ? [pin] : [],
   }));
 

@@ -70,6 +70,12 @@ describe('overtime that the floors force', () => {
     expect(footingWith(sketch, floors).overtimeNeededMinutes).toBe(expected);
   });
 
+  it('leaves a lack only where contracts allow too little of it', () => {
+    const lackWith = (maximumMinutes: number) =>
+      footingWith([{ ...nurse, skillIds: ['nurse'], maximumMinutes }], [{ people: 2 }]).lackMinutes;
+    expect([480, 720, 960, 2000].map(lackWith)).toEqual([480, 240, 0, 0]);
+  });
+
   it('is found with more skills than sets can be listed for', () => {
     const names = Array.from({ length: 40 }, (_, index) => `skill-${index}`);
     const problem = {

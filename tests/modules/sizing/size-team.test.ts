@@ -52,7 +52,7 @@ describe('sizing a team', () => {
   });
 
   it('refuses people who may not size, and teams that are not theirs, without a trace', async () => {
-    const before = db().$count(sizings);
+    const before = await db().$count(sizings);
     const staff = addActor(team.actor.organisationId, 'staff', team.teamId);
     const stranger = addActor(addOrganisation(), 'owner');
     const refusals = [
@@ -64,7 +64,7 @@ describe('sizing a team', () => {
     ];
     const codes = refusals.map((outcome) => (outcome.ok ? 'ok' : outcome.error.code));
     expect(codes).toEqual(['not-allowed', 'not-found', 'not-found', 'not-allowed', 'not-found']);
-    expect(await db().$count(sizings)).toBe(await before);
+    expect(await db().$count(sizings)).toBe(before);
   });
 
   it('refuses shift kinds of another team and retired ones, naming the line', async () => {

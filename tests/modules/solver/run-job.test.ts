@@ -33,7 +33,7 @@ function deafThread(
       for (const message of messages) post(task.port, message);
       onRun(task);
     });
-  vi.mocked(solverPool, { partial: true }).mockReturnValue({ run } as never);
+  vi.mocked(solverPool).mockReturnValue({ run } as never);
 }
 
 const post = (port: MessagePort, message: SolverMessage) => port.postMessage(message);
@@ -48,7 +48,7 @@ afterEach(() => {
 
 describe('a thread that does not answer a stop', () => {
   it('is told through the flag first and ended two seconds later; the best roster is kept', async () => {
-    let flag = new Int32Array(1);
+    let flag = new Int32Array(new SharedArrayBuffer(4));
     deafThread([{ kind: 'started' }, { kind: 'roster', solved: best }], (task) => {
       flag = new Int32Array(task.stopFlag);
     });
@@ -116,7 +116,7 @@ describe('a thread that breaks', () => {
   it('is a failure with a sentence for people and the cause for the log', async () => {
     const cause = new Error('worker exited');
     const run = () => Promise.reject(cause);
-    vi.mocked(solverPool, { partial: true }).mockReturnValue({ run } as never);
+    vi.mocked(solverPool).mockReturnValue({ run } as never);
     expect(await solveRoster(demoSizedProblem(), { limitSeconds: 10 })).toEqual({
       kind: 'failed',
       message:

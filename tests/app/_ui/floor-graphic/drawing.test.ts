@@ -62,6 +62,12 @@ describe('the floor graphic', () => {
     expect(draw(words, { height: 59 }).labels).toEqual([]);
   });
 
+  it('lifts a label over neighbours that its words would run into', () => {
+    const words = week(lane(vet, [at(0, 7), at(0, 10), 1, 0], [at(0, 10), at(0, 23), 3, 3]));
+    const line = baseline - personHeight(3) * 3;
+    expect(draw(words).labels[0]?.y).toBe(rounded(line - 7));
+  });
+
   it('moves a label that would touch the one before it up a row', () => {
     const words = week(
       lane(vet, [at(0, 9), at(0, 17), 1, 0]),
