@@ -12,8 +12,8 @@ export default defineConfig({
   workers: 1,
   retries: 0,
   forbidOnly: true,
-  timeout: 120_000,
-  expect: { timeout: 15_000 },
+  timeout: 300_000,
+  expect: { timeout: 30_000 },
   use: {
     baseURL: `http://localhost:${port}`,
     viewport: { width: 1440, height: 900 },

@@ -13,7 +13,7 @@ export const keyTables: readonly KeyTable[] = [
   {
     place: 'Everywhere',
     lines: [
-      { keys: ['Tab', 'Shift Tab'], does: 'to the next and the last thing to use' },
+      { keys: ['Tab', 'Shift Tab'], does: 'forward and back through what can be used' },
       { keys: ['Esc'], does: 'closes a question or a menu and changes nothing' },
     ],
   },
@@ -45,5 +45,9 @@ export const keyTables: readonly KeyTable[] = [
       { keys: ['Enter'], does: 'opens the days of the person' },
       { keys: ['Esc'], does: 'closes them' },
     ],
+  },
+  {
+    place: 'Calendar',
+    lines: [{ keys: ['T'], does: 'shows the same shifts as a table, and back' }],
   },
 ];

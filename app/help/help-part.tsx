@@ -8,7 +8,7 @@ interface Props {
 }
 
 /** The parts of the page, in order; the list at its top leads to each. */
-export const helpParts = [
+const helpParts = [
   { id: 'floor', title: 'What a floor is' },
   { id: 'drawings', title: 'Reading the drawings' },
   { id: 'words', title: 'Our words' },
@@ -17,6 +17,26 @@ export const helpParts = [
   { id: 'cautions', title: 'Cautions' },
 ] as const;
 type HelpPartName = (typeof helpParts)[number]['id'];
+
+/** The list of the parts; each leads to its own. */
+export function HelpContents() {
+  return (
+    <nav aria-label="On this page">
+      <ul className="flex flex-wrap gap-x-5">
+        {helpParts.map(({ id, title }) => (
+          <li key={id}>
+            <a
+              href={`#${id}`}
+              className="inline-flex min-h-6 items-center text-act underline underline-offset-3 phone:min-h-11"
+            >
+              {title}
+            </a>
+          </li>
+        ))}
+      </ul>
+    </nav>
+  );
+}
 
 /** One part under its head. */
 export function HelpPart({ part, children }: Props) {

@@ -102,7 +102,7 @@ export const words: readonly Topic[] = [
   {
     word: 'Confirm',
     meaning:
-      'Says that you have seen your shifts. It takes no right from you: you can still talk to your supervisor about any of them.',
+      'Says that you have seen your shifts. You can still ask your supervisor for a change, and the shifts stand whether or not you confirm.',
   },
   {
     word: 'Planned and worked hours',

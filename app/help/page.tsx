@@ -3,7 +3,7 @@ import { ButtonLink } from '../_ui/button';
 import { Caution } from '../_ui/caution';
 import { NoticePage } from '../_ui/notice-page';
 import { FloorExample } from './floor-example';
-import { HelpPart, helpParts, TopicList } from './help-part';
+import { HelpContents, HelpPart, TopicList } from './help-part';
 import { cautions, drawings, roles, words } from './help-topics';
 import { KeyList } from './key-list';
 
@@ -13,20 +13,7 @@ export const metadata: Metadata = { title: 'Help' };
 export default function HelpPage() {
   return (
     <NoticePage title="Help">
-      <nav aria-label="On this page">
-        <ul className="flex flex-wrap gap-x-5">
-          {helpParts.map(({ id, title }) => (
-            <li key={id}>
-              <a
-                href={`#${id}`}
-                className="inline-flex min-h-6 items-center text-act underline underline-offset-3 phone:min-h-11"
-              >
-                {title}
-              </a>
-            </li>
-          ))}
-        </ul>
-      </nav>
+      <HelpContents />
       <HelpPart part="floor">
         <p>
           A floor is the least people on duty: how many, of which skill, over which hours. You set

@@ -1,6 +1,5 @@
 import type { PlannedRoster, ProblemFloor } from '../problem';
-import { payFor } from '../units';
-import { centsPerMinute, overtimeOf, premiumPay, timePay } from './pay';
+import { overtimeOf } from './pay';
 import type { RosterModel } from './roster-model';
 import type { FloorRow, ShortColumn } from './rows/floor-rows';
 import type { WorkColumn } from './work-columns';
@@ -40,31 +39,6 @@ export function placeRoster(
     if (chosen) values[chosen.column] = 1;
   }
   return values;
-}
-
-/** What a roster costs and lacks, in whole cents and minutes, from its shifts alone. */
-export interface RosterFigures {
-  readonly shortageMinutes: number;
-  readonly costCents: number;
-}
-
-/** Reckons a solution anew from its shifts, without the errors of the solver's arithmetic. */
-export function weighRoster(model: RosterModel, values: ArrayLike<number>): RosterFigures {
-  const wishedMinutes = new Map<number, number>();
-  let shortageMinutes = 0;
-  for (const floor of model.floors) {
-    for (const [short, missing] of missingIn(floor, values)) {
-      const minutes = missing * (floor.endMinute - floor.startMinute);
-      const price = short.priceCentsPerHour;
-      if (price === null) shortageMinutes += minutes;
-      else wishedMinutes.set(price, (wishedMinutes.get(price) ?? 0) + minutes);
-    }
-  }
-  const wished = [...wishedMinutes].reduce(
-    (sum, [price, minutes]) => sum + payFor(price, minutes),
-    0,
-  );
-  return { shortageMinutes, costCents: payOf(model, values) + wished };
 }
 
 /**
@@ -111,54 +85,16 @@ export function openFloors(model: RosterModel, values: ArrayLike<number>): Probl
   });
 }
 
-/**
- * How far the objective `cost` of the model can lie from the whole cents of `weighRoster`: half a cent
- * for each sum that is rounded once and whose cents a minute do not always come out whole.
- */
-export function roundingSlackCents(model: RosterModel): number {
-  const { problem } = model;
-  const step = problem.shifts.reduce(
-    (sum, { paidMinutes }) => greatestDivisor(sum, paidMinutes),
-    0,
-  );
-  const isWhole = (centsPerHour: number, minutes: number, percent = 100) =>
-    Number.isInteger(centsPerMinute(centsPerHour, percent) * minutes);
-  const sums = problem.people.flatMap((person) => {
-    const minutes = [person.contractMinutes, person.creditMinutes].reduce(greatestDivisor, step);
-    const overtime = isWhole(person.payCentsPerHour, minutes, problem.pay.overtimePercent);
-    return person.paidBy === 'contract'
-      ? [overtime]
-      : [overtime, isWhole(person.payCentsPerHour, greatestDivisor(step, person.creditMinutes))];
-  });
-  const prices = model.floors.flatMap(({ startMinute, endMinute, shorts }) =>
-    shorts.map((short) => [short.priceCentsPerHour ?? 0, endMinute - startMinute] as const),
-  );
-  const broken = prices.filter(([price, minutes]) => !isWhole(price, minutes));
-  const brokenPrices = new Set(broken.map(([price]) => price)).size;
-  return (sums.filter((whole) => !whole).length + brokenPrices) / 2;
-}
-
-function greatestDivisor(one: number, other: number): number {
-  return other === 0 ? Math.abs(one) : greatestDivisor(other, one % other);
-}
-
-function payOf({ problem, works }: RosterModel, values: ArrayLike<number>): number {
-  return works.reduce((sum, { person, columns }) => {
-    const on = columns.filter((work) => isOn(work, values));
-    const premiums = on.reduce((cents, { shift }) => cents + premiumPay(problem, person, shift), 0);
-    const { ordinary, overtime } = timePay(problem, person, workedMinutes(columns, values));
-    return sum + premiums + ordinary + overtime;
-  }, 0);
-}
-
-const workedMinutes = (columns: readonly WorkColumn[], values: ArrayLike<number>): number =>
+/** Paid minutes of one person's columns that are on. */
+export const workedMinutes = (columns: readonly WorkColumn[], values: ArrayLike<number>): number =>
   columns.reduce((sum, work) => sum + (isOn(work, values) ? work.shift.paidMinutes : 0), 0);
 
-const isOn = ({ column }: WorkColumn, values: ArrayLike<number>): boolean =>
+/** Whether the shift of a column is planned. */
+export const isOn = ({ column }: WorkColumn, values: ArrayLike<number>): boolean =>
   (values[column] ?? 0) > onThreshold;
 
 /** How many people each short column of a floor row must stand for. */
-function missingIn(floor: FloorRow, values: ArrayLike<number>): [ShortColumn, number][] {
+export function missingIn(floor: FloorRow, values: ArrayLike<number>): [ShortColumn, number][] {
   const cover = floor.covering.filter((work) => isOn(work, values)).length;
   let missing = Math.max(0, floor.people - cover);
   return floor.shorts.map((short) => {

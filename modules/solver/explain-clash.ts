@@ -7,7 +7,7 @@ import {
 } from '../model';
 import type { Problem, ProblemPerson } from '../problem';
 import { assertNever, formatHours } from '../units';
-import type { LinearSolver } from './highs-adapter';
+import type { LinearSolver } from './linear-solver';
 
 /** A clash of one person's rules is small: this is far more than it takes. */
 const limitSeconds = 5;

@@ -8,7 +8,7 @@ import {
 } from '../model';
 import type { PlannedRoster, Problem, ProblemPerson } from '../problem';
 import { explainClash } from './explain-clash';
-import type { LinearSolver } from './highs-adapter';
+import type { LinearSolver } from './linear-solver';
 import type { PersonClash } from './roster-outcome';
 
 /** Every rule but the floors is about one person alone, so each person can be tested alone, exactly. */

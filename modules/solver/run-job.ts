@@ -21,31 +21,48 @@ export type JobEnd<T> =
 
 /** Runs a job in a solver thread. The event loop stays free; never rejects. */
 export async function runJob<T>(job: SolverJob, options: JobOptions): Promise<JobEnd<T>> {
+  const kill = new AbortController();
+  const line = openLine(options, kill);
+  try {
+    const task: SolverTask = { job, port: line.port, stopFlag: line.stopFlag };
+    const given = { transferList: [line.port], signal: kill.signal };
+    return { kind: 'answered', answer: await solverPool().run(task, given) };
+  } catch (cause) {
+    const [fault] = line.faults;
+    if (fault || !kill.signal.aborted) return { kind: 'broken', cause: fault ?? cause };
+    return { kind: 'killed', wasStopped: options.stop?.aborted ?? false };
+  } finally {
+    line.close();
+  }
+}
+
+/** What connects a job with its thread: messages out, the stop flag in, and the time it is given. */
+function openLine({ limitSeconds, stop, onMessage }: JobOptions, kill: AbortController) {
   const { port1, port2 } = new MessageChannel();
   const stopFlag = new SharedArrayBuffer(Int32Array.BYTES_PER_ELEMENT);
-  const kill = new AbortController();
   const timers: NodeJS.Timeout[] = [];
+  const faults: unknown[] = [];
   const killAfter = (ms: number) => timers.push(setTimeout(() => kill.abort(), ms));
   const requestStop = () => {
     Atomics.store(new Int32Array(stopFlag), 0, 1);
     killAfter(hardStopAfterMs);
   };
   port1.on('message', (message: SolverMessage) => {
-    if (message.kind === 'started') killAfter(options.limitSeconds * 1000 + overrunMs);
-    options.onMessage?.(message);
+    if (message.kind === 'started') killAfter(limitSeconds * 1000 + overrunMs);
+    try {
+      onMessage?.(message);
+    } catch (cause) {
+      // A listener that throws here would end the whole process: it ends the job instead.
+      faults.push(cause);
+      kill.abort();
+    }
   });
-  if (options.stop?.aborted) requestStop();
-  options.stop?.addEventListener('abort', requestStop, { once: true });
-  try {
-    const task: SolverTask = { job, port: port2, stopFlag };
-    const given = { transferList: [port2], signal: kill.signal };
-    return { kind: 'answered', answer: await solverPool().run(task, given) };
-  } catch (cause) {
-    if (!kill.signal.aborted) return { kind: 'broken', cause };
-    return { kind: 'killed', wasStopped: options.stop?.aborted ?? false };
-  } finally {
-    options.stop?.removeEventListener('abort', requestStop);
+  if (stop?.aborted) requestStop();
+  stop?.addEventListener('abort', requestStop, { once: true });
+  const close = () => {
+    stop?.removeEventListener('abort', requestStop);
     for (const timer of timers) clearTimeout(timer);
     port1.close();
-  }
+  };
+  return { port: port2, stopFlag, faults, close };
 }

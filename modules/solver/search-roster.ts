@@ -1,7 +1,7 @@
 import { buildRosterModel, placeRoster, type RosterModel, relaxed, withRowBounds } from '../model';
 import type { Problem } from '../problem';
-import type { LinearOptions, LinearSolver } from './highs-adapter';
 import type { LinearOutcome } from './linear-outcome';
+import type { LinearOptions, LinearSolver } from './linear-solver';
 import { planInTurn } from './plan-in-turn';
 import type { RosterOutcome } from './roster-outcome';
 import { type SearchHooks, SearchState } from './search-state';

@@ -1,7 +1,7 @@
 import { buildSizingModel, readSizing, relaxed, type SizingModel, withRowBounds } from '../model';
 import type { SizingProblem } from '../problem';
-import type { LinearOptions, LinearSolver } from './highs-adapter';
 import type { LinearSolution } from './linear-outcome';
+import type { LinearOptions, LinearSolver } from './linear-solver';
 import type { SizingOutcome } from './roster-outcome';
 
 /** Least shortage counts whole person-minutes: a bound less than one below it proves it. */

@@ -5,6 +5,7 @@ import {
   type RosterModel,
   readRoster,
   roundingSlackCents,
+  shortageStepMinutes,
   weighRoster,
 } from '../model';
 import type { PlannedRoster } from '../problem';
@@ -53,7 +54,7 @@ export class SearchState {
     this.#startedAt = hooks.clock();
     this.#endsAt = this.#startedAt + limitSeconds * 1000;
     this.#slackCents = roundingSlackCents(model);
-    this.#stepMinutes = shortageStep(model);
+    this.#stepMinutes = shortageStepMinutes(model);
     this.#costBound = { cents: this.#leastCents, mostMinutes: Number.POSITIVE_INFINITY };
   }
 
@@ -165,13 +166,3 @@ export class SearchState {
 const isBetter = (one: RosterFigures, other: RosterFigures): boolean =>
   one.shortageMinutes < other.shortageMinutes ||
   (one.shortageMinutes === other.shortageMinutes && one.costCents < other.costCents);
-
-/** Greatest common divisor of the lengths of all slices with firm floors; 1 without any. */
-function shortageStep(model: RosterModel): number {
-  const divisor = (one: number, other: number): number =>
-    other === 0 ? one : divisor(other, one % other);
-  const lengths = model.floors
-    .filter(({ shorts }) => shorts.some(({ priceCentsPerHour }) => priceCentsPerHour === null))
-    .map(({ startMinute, endMinute }) => endMinute - startMinute);
-  return lengths.reduce(divisor, 0) || 1;
-}

@@ -1,6 +1,7 @@
 import loadHighs, { type Highs } from 'highs';
-import { type LinearSolver, solveLinearModel } from './highs-adapter';
+import { solveLinearModel } from './highs-adapter';
 import type { LinearOutcome } from './linear-outcome';
+import type { LinearSolver } from './linear-solver';
 import type { SolverMessage, SolverTask } from './messages';
 import type { RosterOutcome, SizingOutcome } from './roster-outcome';
 import { searchRoster } from './search-roster';

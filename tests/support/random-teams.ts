@@ -12,7 +12,7 @@ const person: fc.Arbitrary<Partial<ProblemPerson>> = fc
     skillIds: fc.constantFrom<string[]>(['nurse'], ['vet'], ['nurse', 'vet']),
     payCentsPerHour: fc.constantFrom(1800, 2400, 3600),
     paidBy: fc.constantFrom('contract' as const, 'hours' as const),
-    shifts: fc.integer({ min: 2, max: 4 }),
+    shifts: fc.integer({ min: 3, max: 5 }),
     overtimeShifts: fc.integer({ min: 0, max: 1 }),
     mayWorkNights: fc.boolean(),
     awayOn: fc.option(fc.integer({ min: 0, max: dayCount - 1 }), { nil: null }),
@@ -21,7 +21,7 @@ const person: fc.Arbitrary<Partial<ProblemPerson>> = fc
   .map(({ shifts, overtimeShifts, awayOn, hasNightBefore, ...rest }) => ({
     ...rest,
     contractMinutes: shifts * 480,
-    minimumMinutes: rest.paidBy === 'contract' ? shifts * 480 : 0,
+    minimumMinutes: rest.paidBy === 'contract' ? (shifts - 1) * 480 : 0,
     maximumMinutes: (shifts + overtimeShifts) * 480,
     creditMinutes: awayOn === null ? 0 : 480,
     absences:
@@ -35,11 +35,11 @@ const person: fc.Arbitrary<Partial<ProblemPerson>> = fc
 
 const floors = fc
   .record({
-    nurseEarly: fc.integer({ min: 0, max: 2 }),
+    nurseEarly: fc.constantFrom(0, 1, 1, 2),
     vetEarly: fc.integer({ min: 0, max: 1 }),
     nurseLate: fc.integer({ min: 0, max: 1 }),
     nightAny: fc.integer({ min: 0, max: 1 }),
-    nurseShared: fc.integer({ min: 0, max: 2 }),
+    nurseShared: fc.integer({ min: 0, max: 1 }),
     wishedLate: fc.integer({ min: 0, max: 1 }),
   })
   .map((needs) =>
@@ -62,7 +62,7 @@ const floorOf = (midnight: number, start: number, skillId: string | null, people
 
 const team = fc
   .record({
-    people: fc.array(person, { minLength: 3, maxLength: 5 }),
+    people: fc.array(person, { minLength: 4, maxLength: 6 }),
     floors,
     longestRunDays: fc.constantFrom(null, 3, 5),
     weekendsPerPeriod: fc.constantFrom(null, 0, 1),
@@ -77,6 +77,6 @@ const team = fc
     }),
   );
 
-/** Small teams of three to five people and a week, the same for the same seed. */
+/** Small teams of four to six people and a week, the same for the same seed. */
 export const randomTeams = (count: number, seed: number): Problem[] =>
   fc.sample(team, { numRuns: count, seed });

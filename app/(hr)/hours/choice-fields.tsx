@@ -15,7 +15,10 @@ interface Props {
   readonly onShow: (choice: HoursChoice) => void;
 }
 
-const half = 'w-44 phone:w-[calc(50%-0.375rem)]';
+const dateFields = [
+  { name: 'from', label: 'First day' },
+  { name: 'to', label: 'Last day' },
+] as const;
 
 /** Team and dates. What was typed stays when it is refused, with the reason at its field. */
 export function ChoiceFields({ teams, typed, isUnreadable, onShow }: Props) {
@@ -47,22 +50,17 @@ export function ChoiceFields({ teams, typed, isUnreadable, onShow }: Props) {
           ))}
         </SelectField>
       ) : null}
-      <TextField
-        label="First day"
-        type="date"
-        error={errors.from?.message}
-        className={half}
-        defaultValue={typed.from}
-        {...form.register('from')}
-      />
-      <TextField
-        label="Last day"
-        type="date"
-        error={errors.to?.message}
-        className={half}
-        defaultValue={typed.to}
-        {...form.register('to')}
-      />
+      {dateFields.map(({ name, label }) => (
+        <TextField
+          key={name}
+          label={label}
+          type="date"
+          error={errors[name]?.message}
+          className="w-44 phone:w-[calc(50%-0.375rem)]"
+          defaultValue={typed[name]}
+          {...form.register(name)}
+        />
+      ))}
       <Button type="submit" look="primary" className="mt-[1.4rem] min-h-9! phone:mt-0 phone:w-full">
         Show hours
       </Button>

@@ -1,4 +1,29 @@
-/** The two header lines: groups, then columns. Its order is that of `HoursRow` and `HoursFoot`. */
+/** The hairline that sets a group of columns apart. */
+export const groupStart = 'border-l border-l-rule!';
+
+interface Column {
+  readonly head: string;
+  readonly isFigure: boolean;
+  readonly isGroupStart?: true;
+}
+
+/** The columns in the order of `HoursRow` and `HoursFoot`. */
+const columns: readonly Column[] = [
+  { head: 'Person', isFigure: false },
+  { head: 'Staff no.', isFigure: false },
+  { head: 'Contract', isFigure: true },
+  { head: 'Against contract', isFigure: false },
+  { head: 'Planned', isFigure: true, isGroupStart: true },
+  { head: 'Worked', isFigure: true },
+  { head: 'Difference', isFigure: true },
+  { head: 'Night', isFigure: true, isGroupStart: true },
+  { head: 'Weekend', isFigure: true },
+  { head: 'Holiday', isFigure: true },
+  { head: 'Leave', isFigure: true, isGroupStart: true },
+];
+const group = `${groupStart} text-center! font-normal! text-ink2`;
+
+/** The two header lines: groups, then columns. */
 export function HoursHead() {
   return (
     <thead>
@@ -13,38 +38,17 @@ export function HoursHead() {
         <td className={groupStart} />
       </tr>
       <tr>
-        <th scope="col">Person</th>
-        <th scope="col">Staff no.</th>
-        <th scope="col" data-figure>
-          Contract
-        </th>
-        <th scope="col">Against contract</th>
-        <th scope="col" data-figure className={groupStart}>
-          Planned
-        </th>
-        <th scope="col" data-figure>
-          Worked
-        </th>
-        <th scope="col" data-figure>
-          Difference
-        </th>
-        <th scope="col" data-figure className={groupStart}>
-          Night
-        </th>
-        <th scope="col" data-figure>
-          Weekend
-        </th>
-        <th scope="col" data-figure>
-          Holiday
-        </th>
-        <th scope="col" data-figure className={groupStart}>
-          Leave
-        </th>
+        {columns.map(({ head, isFigure, isGroupStart }) => (
+          <th
+            key={head}
+            scope="col"
+            data-figure={isFigure || undefined}
+            className={isGroupStart ? groupStart : ''}
+          >
+            {head}
+          </th>
+        ))}
       </tr>
     </thead>
   );
 }
-
-/** The hairline that sets a group of columns apart. */
-export const groupStart = 'border-l border-l-rule!';
-const group = `${groupStart} text-center! font-normal! text-ink2`;

@@ -1,47 +1,22 @@
-import type { KeyboardEvent } from 'react';
-import { Button } from '@/app/_ui/button';
-import type { HoursPerson } from '@/modules/hours';
 import { againstContract } from './against-contract';
 import { ContractBarDrawing } from './contract-bar-drawing';
 import { HoursCell } from './hours-cell';
 import { groupStart } from './hours-head';
-import { rowId } from './place-focus';
+import { PersonHead, type PersonHeadProps } from './person-head';
 import type { HoursFormats } from './sum-hours';
 import { WorkedCells } from './worked-cells';
 
-interface Props {
-  readonly person: HoursPerson;
+interface Props extends PersonHeadProps {
   /** Minutes at the right end of the bar. */
   readonly longest: number;
   readonly formats: HoursFormats;
-  readonly isTabStop: boolean;
-  readonly isChosen: boolean;
-  readonly panelId: string;
-  readonly onFocus: () => void;
-  readonly onKeyDown: (event: KeyboardEvent) => void;
-  readonly onChoose: () => void;
 }
 
 /** One person: who, the bar against the contract with its word, and the hours. */
-export function HoursRow({ person, longest, formats, isTabStop, isChosen, ...props }: Props) {
+export function HoursRow({ person, longest, formats, isChosen, ...props }: Props) {
   return (
     <tr className={isChosen ? `*:bg-act-wash! ${chosenOutline}` : 'hover:*:bg-recess!'}>
-      <th scope="row" className="whitespace-nowrap phone:min-w-40 phone:whitespace-normal">
-        <Button
-          look="quiet"
-          id={rowId(person.personId)}
-          tabIndex={isTabStop ? 0 : -1}
-          aria-expanded={isChosen}
-          aria-controls={isChosen ? props.panelId : undefined}
-          onFocus={props.onFocus}
-          onKeyDown={props.onKeyDown}
-          onClick={props.onChoose}
-          className="text-left"
-        >
-          {person.name}
-        </Button>{' '}
-        <span className="font-normal text-ink2">{person.homeSkill}</span>
-      </th>
+      <PersonHead person={person} isChosen={isChosen} {...props} />
       <td className="tabular-nums">{person.staffNumber}</td>
       <HoursCell minutes={person.contractMinutes} format={formats.contractMinutes} />
       <td>

@@ -1,20 +1,20 @@
 'use client';
 
-import { useEffect, useRef } from 'react';
-import { Button, buttonClass } from '@/app/_ui/button';
+import { Button } from '@/app/_ui/button';
 import { Caution } from '@/app/_ui/caution';
-import { dateRange, dateRangeWithYear } from '@/app/_ui/clock';
-import { useAnnounce } from '@/app/_ui/live-region';
+import { dateRange } from '@/app/_ui/clock';
 import { ProblemNote } from '@/app/_ui/problem-note';
 import { TitleBlock } from '@/app/_ui/title-block';
-import { Verdict } from '@/app/_ui/verdict';
 import type { HoursView } from '@/modules/hours';
 import { ChoiceFields } from './choice-fields';
-import { type HoursChoice, hoursPath } from './hours-address';
+import type { HoursChoice } from './hours-address';
 import { HoursDrawing } from './hours-drawing';
+import { HoursVerdict } from './hours-verdict';
+import { NothingPublished, type NothingPublishedProps } from './nothing-published';
 import { PeriodButtons } from './period-buttons';
 import { standingFigures } from './standing-figures';
 import { useHours } from './use-hours';
+import { useSpokenRange } from './use-spoken-range';
 
 interface Props {
   readonly teams: readonly { readonly id: string; readonly name: string }[];
@@ -25,33 +25,26 @@ interface Props {
 /** The hours sheet: which dates, the table of people, one person's days. */
 export function HoursSheetView({ teams, start, hours }: Props) {
   const { choice, query, show, typed, isUnreadable } = useHours({ choice: start, hours });
-  const { from, to } = choice.range;
-  useSpokenRange(query.isPlaceholderData ? undefined : query.data);
+  const view = query.data;
+  const teamName = teams.find(({ id }) => id === choice.teamId)?.name ?? hours.teamName;
+  useSpokenRange(query.isPlaceholderData ? undefined : view);
   return (
     <>
-      <Verdict
-        lead={`${query.data?.teamName ?? ''}. Open: nothing is locked, so these figures can still change.`}
-        actions={
-          <a
-            href={`/api/v1/${hoursPath(choice, '.csv')}`}
-            download
-            className={buttonClass('outline')}
-          >
-            Download CSV, {dateRangeWithYear(from, to)}
-          </a>
-        }
-      >
-        Hours, {dateRange(from, to)}
-      </Verdict>
+      <HoursVerdict choice={choice} teamName={teamName} />
       <ChoiceFields teams={teams} typed={typed} isUnreadable={isUnreadable} onShow={show} />
-      <PeriodButtons periods={query.data?.allPeriods ?? []} shown={choice.range} onShow={show} />
+      <PeriodButtons periods={view?.allPeriods ?? []} shown={choice.range} onShow={show} />
       <div aria-busy={query.isFetching} className="mt-4">
-        <p className="text-second text-ink2">{query.isPlaceholderData ? 'Reading hours…' : null}</p>
+        {query.isPlaceholderData && view ? (
+          <p className="mb-2 text-body text-ink2">
+            Reading hours… Below are still those of {view.teamName}, {dateRange(view.from, view.to)}
+            .
+          </p>
+        ) : null}
         <ProblemNote
           problem={query.error}
           action={<Button onClick={() => query.refetch()}>Try again</Button>}
         />
-        {query.data ? <HoursDrawing view={query.data} onShow={show} /> : null}
+        {view ? <Hours view={view} onShow={show} /> : null}
       </div>
       <div className="mt-9">
         <Caution>
@@ -59,21 +52,15 @@ export function HoursSheetView({ teams, start, hours }: Props) {
           legal advice: local law, agreements and licensed practice come first.
         </Caution>
       </div>
-      {query.data ? <TitleBlock figures={standingFigures(query.data)} /> : null}
+      {view ? <TitleBlock figures={standingFigures(view)} /> : null}
     </>
   );
 }
 
-/** Has it read aloud when other dates are shown; the first drawing stays silent. */
-function useSpokenRange(view: HoursView | undefined) {
-  const announce = useAnnounce();
-  const sentence = view
-    ? `Hours of ${view.teamName}, ${dateRange(view.from, view.to, ' to ')}, ${view.people.length} people.`
-    : null;
-  const last = useRef(sentence);
-  useEffect(() => {
-    if (sentence === null || sentence === last.current) return;
-    last.current = sentence;
-    announce(sentence);
-  }, [sentence, announce]);
+function Hours({ view, onShow }: NothingPublishedProps) {
+  return view.people.some(({ days }) => days.length > 0) ? (
+    <HoursDrawing view={view} />
+  ) : (
+    <NothingPublished view={view} onShow={onShow} />
+  );
 }

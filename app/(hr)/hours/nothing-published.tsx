@@ -3,13 +3,13 @@ import { dateRange, dateRangeWithYear } from '@/app/_ui/clock';
 import type { HoursView } from '@/modules/hours';
 import type { HoursChoice } from './hours-address';
 
-interface Props {
+export interface NothingPublishedProps {
   readonly view: HoursView;
   readonly onShow: (next: Partial<HoursChoice>) => void;
 }
 
 /** Stands in place of the table when nothing is planned or worked in the dates. */
-export function NothingPublished({ view, onShow }: Props) {
+export function NothingPublished({ view, onShow }: NothingPublishedProps) {
   const { from, to, allPeriods } = view;
   const newest = allPeriods.at(-1);
   return (

@@ -12,16 +12,20 @@ interface Props {
   readonly onChange: (change: MemberChangeOf) => Promise<unknown>;
 }
 
-/** One row for each account. */
+/** One row for each account. On phones e-mail and state stand with name and roles. */
 export function MembersTable({ members, groups, ownUserId, onChange }: Props) {
   return (
-    <Table label="Members">
+    <Table label="Members" holdsFirstColumn={false}>
       <thead>
         <tr>
           <th scope="col">Name</th>
-          <th scope="col">E-mail</th>
+          <th scope="col" className="phone:hidden">
+            E-mail
+          </th>
           <th scope="col">Roles</th>
-          <th scope="col">State</th>
+          <th scope="col" className="phone:hidden">
+            State
+          </th>
           <th scope="col">Change</th>
         </tr>
       </thead>

@@ -1,9 +1,9 @@
 import { type FormEvent, useState } from 'react';
 import { Button } from '@/app/_ui/button';
-import { CheckField } from '@/app/_ui/check-field';
 import { ProblemNote } from '@/app/_ui/problem-note';
 import type { Member } from '@/modules/access';
 import { readRoles } from './read-roles';
+import { RoleBoxes } from './role-boxes';
 import { keysOf, type RoleGroup } from './role-choices';
 import type { MemberChangeOf } from './use-member-changes';
 
@@ -15,7 +15,7 @@ interface Props {
   readonly onClose: () => void;
 }
 
-/** One box for each role and team. */
+/** The roles of a member to tick. What was ticked stays when it is refused. */
 export function RolesForm({ member, groups, isOwn, onChange, onClose }: Props) {
   const [keys, setKeys] = useState<readonly string[]>(() => keysOf(member.memberships));
   const [error, setError] = useState<string | null>(null);
@@ -38,21 +38,7 @@ export function RolesForm({ member, groups, isOwn, onChange, onClose }: Props) {
         Owner and HR count in every team, supervisor and staff in theirs.
         {isOwn ? ' This is your own account: without Owner this sheet closes for you.' : ''}
       </p>
-      {groups.map(({ name, choices }) => (
-        <fieldset key={name} className="mt-3">
-          <legend className="text-second font-[640]">{name}</legend>
-          <div className="flex flex-wrap gap-x-6">
-            {choices.map(({ key, label }) => (
-              <CheckField
-                key={key}
-                label={label}
-                checked={keys.includes(key)}
-                onChange={(event) => tick(key, event.target.checked)}
-              />
-            ))}
-          </div>
-        </fieldset>
-      ))}
+      <RoleBoxes groups={groups} keys={keys} onTick={tick} />
       {error ? (
         <p role="alert" className="mt-2 text-second font-[640] text-short">
           <span aria-hidden="true">! </span>

@@ -33,7 +33,7 @@ export function MailTable({ mails, zone, openName, onOpen }: Props) {
                 id={`mail-${name}`}
                 aria-pressed={name === openName}
                 onClick={() => onOpen(name)}
-                className="text-left break-all"
+                className="text-left desk:whitespace-nowrap phone:[overflow-wrap:anywhere]"
               >
                 {to}
               </Button>

@@ -22,7 +22,6 @@ interface Props {
   readonly view: View;
   readonly blocks: readonly Block[];
   readonly world: CalendarWorld;
-  readonly isRead: boolean;
 }
 
 /* English weeks begin on Monday. */
@@ -39,8 +38,8 @@ const components: Components<CalendarEvent> = {
  * The views of react-big-calendar in our look. It lays out months, weeks, days and the agenda; what stands
  * in them is ours: cells of the month as buttons, blocks placed by the team's clock.
  */
-export default function BigCalendar({ view, blocks, world, isRead }: Props) {
-  const { frame, date, selected, onPick } = world;
+export default function BigCalendar({ view, blocks, world }: Props) {
+  const { frame, date, selected, onPick, isRead } = world;
   const events = useMemo(
     () => toEvents(blocks, frame.dayStartsAtMinute),
     [blocks, frame.dayStartsAtMinute],

@@ -39,17 +39,20 @@ export function CalendarSheet({ place, entries, problem, onRetry, children, ...r
   return (
     // biome-ignore lint/a11y/noStaticElementInteractions: T is a short cut to the button above
     <div ref={sheet} tabIndex={-1} onKeyDown={onKeyDown} className="min-w-0">
-      <ProblemNote problem={problem} action={<Button onClick={onRetry}>Read again</Button>} />
+      <div className="mb-2 empty:hidden">
+        <ProblemNote problem={problem} action={<Button onClick={onRetry}>Read again</Button>} />
+      </div>
       {entries === null && !problem ? (
         <p className="late-words text-second text-ink2">Reading {title}…</p>
       ) : null}
-      {isTable ? (
+      {isTable && entries !== null ? (
         <CalendarTable
           label={`Shifts, ${title}`}
           {...{ blocks, range, audience }}
           holidays={frame.holidays}
         />
-      ) : (
+      ) : null}
+      {isTable ? null : (
         <section
           // biome-ignore lint/a11y/noNoninteractiveTabindex: a strip that scrolls must take the keyboard
           tabIndex={0}
@@ -61,8 +64,7 @@ export function CalendarSheet({ place, entries, problem, onRetry, children, ...r
           <LazyCalendar
             view={view}
             blocks={shown}
-            isRead={entries !== null}
-            world={{ ...rest, date, range, blocksOn }}
+            world={{ ...rest, date, range, blocksOn, isRead: entries !== null }}
           />
         </section>
       )}

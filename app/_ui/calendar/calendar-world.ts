@@ -10,6 +10,8 @@ export interface CalendarWorld {
   readonly frame: CalendarFrame;
   /** own: the shifts of one person. team: counts and names. */
   readonly audience: 'own' | 'team';
+  /** False while the shifts are read: a day without blocks then says nothing. */
+  readonly isRead: boolean;
   readonly blocksOn: ReadonlyMap<LocalDate, readonly Block[]>;
   /** Leave of the person, for `own`. */
   readonly leave: readonly { readonly startsOn: LocalDate; readonly endsOn: LocalDate }[];

@@ -2,7 +2,7 @@
 
 import type { DateHeaderProps } from 'react-big-calendar';
 import type { LocalDate } from '@/modules/units';
-import { dayNumber } from '../clock';
+import { dayNumber, longDay } from '../clock';
 import { DayLine } from '../day-line';
 import { KindMark } from '../kind-mark';
 import { blockTimes, isDraft, ownDaySentence, teamDaySentence } from './block-words';
@@ -22,6 +22,7 @@ export function DayCell({ date: moment, isOffRange }: DateHeaderProps) {
   const notes = dayNotes(world, date);
   const isToday = date === world.frame.today;
   const isOwn = world.audience === 'own';
+  const daySentence = isOwn ? ownDaySentence : teamDaySentence;
   return (
     <button
       type="button"
@@ -31,7 +32,7 @@ export function DayCell({ date: moment, isOffRange }: DateHeaderProps) {
       className={`day-cell ${isOffRange ? 'text-ink3' : 'text-ink'}`}
     >
       <span className="sr-only">
-        {isOwn ? ownDaySentence(date, blocks, notes) : teamDaySentence(date, blocks, notes)}
+        {world.isRead ? daySentence(date, blocks, notes) : longDay(date)}
       </span>
       <span aria-hidden="true" className="flex min-w-0 flex-1 flex-col">
         <span className="flex flex-wrap items-baseline justify-between gap-x-1">

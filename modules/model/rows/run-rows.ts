@@ -35,16 +35,16 @@ interface Run {
 
 function addWindowRows(builder: ModelBuilder, run: Run): void {
   const { byDay, personIndex } = run.work;
+  const counted = byDay.map((works) => works.filter(run.counts));
   for (let first = -run.longest; first + run.longest < byDay.length; first += 1) {
     const days = Array.from({ length: run.longest + 1 }, (_, index) => first + index);
     const room = run.longest - days.filter((day) => run.worked.has(day)).length;
-    const counted = days.map((day) => (byDay[day] ?? []).filter(run.counts));
-    const canBeWorked = counted.filter((works) => works.length > 0).length;
-    if (canBeWorked <= room) continue;
+    const workable = days.flatMap((day) => (counted[day]?.length ? [counted[day]] : []));
+    if (workable.length <= room) continue;
     builder.addRow({
       name: `${run.name}(p${personIndex},d${first})`,
       upper: room,
-      entries: counted.flat().map(({ column }) => [column, 1]),
+      entries: workable.flatMap((works) => works.map(({ column }) => [column, 1] as const)),
     });
   }
 }

@@ -112,6 +112,18 @@ describe('a thread that overruns its time', () => {
   });
 });
 
+describe('a listener that throws', () => {
+  it('ends its own run as failed, with its cause, and nothing else', async () => {
+    deafThread([{ kind: 'started' }, { kind: 'roster', solved: best }]);
+    const cause = new Error('the disk is full');
+    const onRoster = () => {
+      throw cause;
+    };
+    const outcome = await solveRoster(demoSizedProblem(), { limitSeconds: 10, onRoster });
+    expect(outcome).toMatchObject({ kind: 'failed', cause });
+  });
+});
+
 describe('a thread that breaks', () => {
   it('is a failure with a sentence for people and the cause for the log', async () => {
     const cause = new Error('worker exited');

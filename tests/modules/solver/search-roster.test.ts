@@ -3,7 +3,8 @@ import { describe, expect, it } from 'vitest';
 import { type Problem, type ProblemPerson, problemSchema } from '@/modules/problem';
 import { proveRoster } from '@/modules/proof';
 import type { RosterProgress } from '@/modules/solver';
-import { type LinearSolver, solveLinearModel } from '@/modules/solver/highs-adapter';
+import { solveLinearModel } from '@/modules/solver/highs-adapter';
+import type { LinearSolver } from '@/modules/solver/linear-solver';
 import { type RosterOptions, searchRoster } from '@/modules/solver/search-roster';
 import { buildProblem, houseKinds, type ProblemSketch } from '@/tests/support/problem-builder';
 

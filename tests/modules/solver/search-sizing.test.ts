@@ -1,7 +1,8 @@
 import loadHighs from 'highs';
 import { expect, it } from 'vitest';
 import type { SizingProblem } from '@/modules/problem';
-import { type LinearSolver, solveLinearModel } from '@/modules/solver/highs-adapter';
+import { solveLinearModel } from '@/modules/solver/highs-adapter';
+import type { LinearSolver } from '@/modules/solver/linear-solver';
 import { searchSizing } from '@/modules/solver/search-sizing';
 
 const highs = await loadHighs();

@@ -60,6 +60,19 @@ it.each([
   },
 );
 
+it('holds every floor of a hospital of 24 people within one percent of the least cost', async () => {
+  const problem = demoSizedProblem();
+  const outcome = await solveRoster(problem, { limitSeconds: 280, targetGap: 0.01 });
+  if (outcome.kind !== 'optimal' && outcome.kind !== 'good-enough') throw new Error(outcome.kind);
+  const { roster, costCents, gap } = outcome;
+  expect(gap).toBeLessThanOrEqual(0.01);
+  expect(proveRoster(problem, roster)).toMatchObject({
+    breaches: [],
+    shortageMinutes: 0,
+    costCents,
+  });
+}, 300_000);
+
 it('keeps the best roster, lawful and with honest figures, when it is stopped', async () => {
   const stop = new AbortController();
   const problem = demoSizedProblem();

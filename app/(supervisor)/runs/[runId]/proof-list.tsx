@@ -10,12 +10,10 @@ export function ProofList({ run }: { readonly run: RunView }) {
       <SectionHead id="rules-held">Held in every roster of this run</SectionHead>
       <dl>
         {run.rules.map(({ label, limit, source }) => (
-          <div key={label} className="border-b border-rule py-1">
-            <div className="flex justify-between gap-4">
-              <dt>{label}</dt>
-              <dd className="font-[640] whitespace-nowrap">{limit}</dd>
-            </div>
-            <dd className="text-second text-ink2">{source}</dd>
+          <div key={label} className="grid grid-cols-[1fr_auto] gap-x-4 border-b border-rule py-1">
+            <dt>{label}</dt>
+            <dd className="font-[640] whitespace-nowrap">{limit}</dd>
+            <dd className="col-span-2 text-second text-ink2">{source}</dd>
           </div>
         ))}
       </dl>
