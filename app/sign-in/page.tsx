@@ -26,7 +26,7 @@ export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>
           </h1>
           <p className="mt-6 text-verdict font-normal text-ink2 phone:mt-3 phone:text-head">
             You set the fewest people each hour needs. Floorwright finds a roster that keeps to it,
-            fairly and at the least cost.
+            at the least cost.
           </p>
         </div>
         <SignInForm

@@ -31,7 +31,7 @@ export const runningRoster: Readonly<Record<string, string>> = {
   'Zuri Hallam': '.....LLL...E..DEL.L.EDED....',
 };
 
-/** The draft, as its run left it before Tobias Lindrao's leave took two Nights away. */
+/** The draft, as its run left it before Tobias Lindrao's leave took two shifts away. */
 export const draftRoster: Readonly<Record<string, string>> = {
   'Maren Oduya': 'N.LNN.N.EDEE.......N.DDDLN..',
   'Tobias Lindrao': '.EDEEN.N.EDL..DNNN.EEN.EELL.',

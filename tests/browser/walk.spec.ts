@@ -56,6 +56,8 @@ test('a supervisor adds a shift kind, is told what is wrong with it, and retires
   await form.getByRole('button', { name: 'Add shift kind' }).click();
   await expect(form).toContainText('Early');
   await expect(form.getByLabel('Name')).toHaveValue('Clinic');
+  // The browser itself logs the refusal; it is the one that is meant.
+  expect(supervisor.faults.splice(0)).toEqual([expect.stringContaining('400')]);
   await form.getByLabel('Letter on the brick').fill('C');
   await form.getByRole('button', { name: 'Add shift kind' }).click();
   await expect(form).toBeHidden();

@@ -49,7 +49,7 @@ describe.each(['2027-01-14T09:00:00Z', '2027-10-22T09:00:00Z'])('the demo on %s'
     expect(boards[0]?.proof).toMatchObject({ breaches: [], shortageMinutes: 0 });
   });
 
-  it('has a draft that is short of two vets at night, and breaks no rule', () => {
+  it('has a draft that is short of a vet on two shifts, and breaks no rule', () => {
     expect(boards[1]?.proof).toMatchObject({ breaches: [], shortageMinutes: 960 });
     expect(boards[1]?.proof?.shortages.map(({ missingPeople }) => missingPeople)).toEqual([1, 1]);
   });
