@@ -1,8 +1,8 @@
 'use client';
 
 import type { ReactNode } from 'react';
+import { Dialog, Heading, Modal, ModalOverlay } from 'react-aria-components';
 import { Button } from './button';
-import { DialogFrame } from './dialog-frame';
 
 interface Props {
   /** The question, e.g. "Publish the roster of 1–28 February?". */
@@ -21,29 +21,36 @@ interface Props {
 export function AskDialog(props: Props) {
   const { title, children, confirmLabel, cancelLabel = 'Cancel', onConfirm } = props;
   return (
-    <DialogFrame
-      role="alertdialog"
-      title={title}
+    <ModalOverlay
       isOpen={props.isOpen}
       onOpenChange={props.onOpenChange}
+      isDismissable
+      className="fixed inset-0 z-30 grid place-items-center overflow-y-auto bg-recess/85 p-4"
     >
-      {(close) => (
-        <>
-          <div className="mt-3 text-body">{children}</div>
-          <div className="mt-6 flex flex-wrap justify-end gap-2">
-            <Button onClick={close}>{cancelLabel}</Button>
-            <Button
-              look="primary"
-              onClick={() => {
-                close();
-                onConfirm();
-              }}
-            >
-              {confirmLabel}
-            </Button>
-          </div>
-        </>
-      )}
-    </DialogFrame>
+      <Modal className="w-full max-w-[34rem] border-3 border-ink bg-paper">
+        <Dialog role="alertdialog" className="p-6 outline-none">
+          {({ close }) => (
+            <>
+              <Heading slot="title" className="text-verdict font-[660]">
+                {title}
+              </Heading>
+              <div className="mt-3 text-body">{children}</div>
+              <div className="mt-6 flex flex-wrap justify-end gap-2">
+                <Button onClick={close}>{cancelLabel}</Button>
+                <Button
+                  look="primary"
+                  onClick={() => {
+                    close();
+                    onConfirm();
+                  }}
+                >
+                  {confirmLabel}
+                </Button>
+              </div>
+            </>
+          )}
+        </Dialog>
+      </Modal>
+    </ModalOverlay>
   );
 }

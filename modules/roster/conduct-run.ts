@@ -10,6 +10,7 @@ import { solveRoster } from '../solver/server';
 import { assertNever } from '../units';
 import type { ActiveRun } from './active-runs';
 import { adoptRoster, findLostPin } from './adopt-roster';
+import { findLawfulPlan } from './find-lawful-plan';
 import { judgeOutcome, type Verdict } from './judge-outcome';
 import { reportProgress } from './report-progress';
 import { endRun, keepRunRoster } from './store';
@@ -26,6 +27,7 @@ export async function conductRun(
   try {
     const outcome = await solveRoster(problem, {
       limitSeconds: run.limitSeconds,
+      start: findLawfulPlan(run.rosterId, problem),
       stop: active.stop.signal,
       onProgress: reporter.report,
       onRoster: (roster) => keepBest(run, roster),

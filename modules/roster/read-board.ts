@@ -1,6 +1,7 @@
 import { now } from '../../db/clock';
 import { type Actor, canInTeam, type TeamInfo } from '../access';
 import { listHolidays } from '../coverage/server';
+import type { Problem } from '../problem';
 import { addDays, type Outcome, ok, type RosterId, toInstant, toLocal, weekdayOf } from '../units';
 import { periodDays } from './axis';
 import { boardKinds, boardPeople, toCells } from './board-parts';
@@ -10,7 +11,14 @@ import { withoutPay } from './hide-pay';
 import { noticeWarningOf } from './notice';
 import { proofOf } from './prove-version';
 import { requireRoster } from './require';
-import { findRun, findRunningRun, getNewestVersion, listShifts, listTeamShifts } from './store';
+import {
+  findRun,
+  findRunningRun,
+  getNewestVersion,
+  listShifts,
+  listTeamShifts,
+  readRunDocuments,
+} from './store';
 import type { Roster, Version } from './stored';
 import { summariseRun } from './summarise-run';
 import { readTeamWords } from './team-words';
@@ -28,7 +36,8 @@ export function readBoard(actor: Actor, rosterId: RosterId): Outcome<Board> {
   const version = getNewestVersion(rosterId);
   const { publishedAtUtc } = version;
   const today = toLocal(now(), team.zone).date;
-  const drawing = readDrawing(team, roster, version);
+  const { problem, notes } = gatherProblem(team, roster);
+  const drawing = readDrawing(team, roster, version, problem);
   return ok({
     rosterId,
     teamId: team.id,
@@ -53,13 +62,14 @@ export function readBoard(actor: Actor, rosterId: RosterId): Outcome<Board> {
     maySeePay,
     noticeWarning: publishedAtUtc === null ? noticeWarningOf(team, roster.startsOn, today) : null,
     activeRunId: findRunningRun(rosterId)?.id ?? null,
+    notes,
     run: runOf(version, maySeePay),
+    isRunCurrent: isRunCurrent(version, problem),
   });
 }
 
-function readDrawing(team: TeamInfo, roster: Roster, version: Version) {
+function readDrawing(team: TeamInfo, roster: Roster, version: Version, problem: Problem) {
   const words = readTeamWords(team.id);
-  const { problem, notes } = gatherProblem(team, roster);
   const shifts = listShifts(version.id);
   const origin = toInstant(roster.startsOn, 0, team.zone);
   const proof = proofOf(version, shifts, words, () => problem);
@@ -91,7 +101,6 @@ function readDrawing(team: TeamInfo, roster: Roster, version: Version) {
       axisMinutes,
     ),
     proof,
-    notes,
   };
 }
 
@@ -109,4 +118,11 @@ function readDays(team: TeamInfo, { startsOn, endsOn }: Roster): Board['days'] {
 function runOf(version: Version, maySeePay: boolean): RunSummary | null {
   const run = version.runId === null ? null : findRun(version.runId);
   return run && summariseRun(run, maySeePay);
+}
+
+/** Whether the run that made a version had the floors, people and rules of today; its bound holds for no others. */
+function isRunCurrent({ runId }: Version, problem: Problem): boolean {
+  return (
+    runId !== null && JSON.stringify(readRunDocuments(runId).problem) === JSON.stringify(problem)
+  );
 }

@@ -132,6 +132,8 @@ export interface Board {
   readonly activeRunId: RunId | null;
   /** The run that made this version, with its proven bound. */
   readonly run: RunSummary | null;
+  /** False once floors, people or rules changed after that run: its bound says nothing about today's. */
+  readonly isRunCurrent: boolean;
 }
 
 export type RunState = 'running' | 'done' | 'stopped' | 'failed' | 'interrupted';

@@ -1,5 +1,5 @@
 import { buildRosterModel, placeRoster, type RosterModel, relaxed, withRowBounds } from '../model';
-import type { Problem } from '../problem';
+import type { PlannedRoster, Problem } from '../problem';
 import type { LinearOutcome } from './linear-outcome';
 import type { LinearOptions, LinearSolver } from './linear-solver';
 import { planInTurn } from './plan-in-turn';
@@ -11,6 +11,8 @@ export interface RosterOptions {
   /** Relative gap of the cost at which to stop; 0 searches to the end. */
   readonly targetGap: number;
   readonly seed: number;
+  /** A roster that breaks no rule, e.g. the draft: the search never ends with a worse one. */
+  readonly start: PlannedRoster | null;
 }
 
 /** Share of the time for a roster that reaches the bound of the relaxation, when none is found. */
@@ -42,6 +44,7 @@ export function searchRoster(
   const first = planInTurn(stoppable, model, () => state.remainingSeconds());
   if (first.kind === 'impossible') return first;
   if (first.kind === 'lawful') state.offer(placeRoster(model, first.roster));
+  if (options.start) state.offer(placeRoster(model, options.start));
   const failure = searchStages({ solve, model, state, options });
   state.report(true);
   return failure ?? conclude(state, options);

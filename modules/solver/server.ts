@@ -17,6 +17,8 @@ export interface SolveRosterOptions {
   /** Relative gap of the cost at which to stop; left out: search to the end. */
   readonly targetGap?: number;
   readonly seed?: number;
+  /** A roster that breaks no rule, e.g. the draft: the run never ends with a worse one. */
+  readonly start?: PlannedRoster | null;
   readonly onProgress?: (progress: RosterProgress) => void;
   /** Each roster that is better than all before it. */
   readonly onRoster?: (roster: PlannedRoster) => void;
@@ -29,10 +31,10 @@ export async function solveRoster(
   problem: Problem,
   options: SolveRosterOptions,
 ): Promise<RosterOutcome> {
-  const { limitSeconds, targetGap = 0, seed = 0, stop } = options;
+  const { limitSeconds, targetGap = 0, seed = 0, start = null, stop } = options;
   let best: SolvedRoster | null = null;
   const end = await runJob<RosterOutcome>(
-    { kind: 'roster', problem, options: { limitSeconds, targetGap, seed } },
+    { kind: 'roster', problem, options: { limitSeconds, targetGap, seed, start } },
     {
       limitSeconds,
       stop,

@@ -72,9 +72,12 @@ test('a run holds every floor, with its cost, bound and gap on screen, and is re
   await expectAccessible(page);
   await page.getByRole('button', { name: 'Run again' }).click();
   await expect(page.getByRole('heading', { level: 1 })).toContainText('is making the roster');
-  await expect(page.getByRole('heading', { level: 1 })).toHaveText('Run 1: every floor holds', {
-    timeout: 90_000,
-  });
+  await expect(page.getByRole('heading', { level: 1 })).toHaveText(
+    'Run 1, 1–28 February: every floor holds',
+    {
+      timeout: 90_000,
+    },
+  );
   await expect(page.getByText('Re-checked by separate code: 0 problems.').first()).toBeVisible();
   await expect(page.getByText('Proven: no roster can cost less than')).toBeVisible();
   await expect(page.getByText('Most that waiting can still save')).toBeVisible();

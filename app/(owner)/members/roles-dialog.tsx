@@ -1,4 +1,4 @@
-import { DialogFrame } from '@/app/_ui/dialog-frame';
+import { FormDialog } from '@/app/_ui/form-dialog';
 import type { Member } from '@/modules/access';
 import type { RoleGroup } from './role-choices';
 import { RolesForm } from './roles-form';
@@ -16,13 +16,8 @@ interface Props {
 /** The roles of a member as boxes to tick. Stays open with what was ticked when it is refused. */
 export function RolesDialog({ member, isOpen, onOpenChange, ...form }: Props) {
   return (
-    <DialogFrame
-      role="dialog"
-      title={`Roles of ${member.name}`}
-      isOpen={isOpen}
-      onOpenChange={onOpenChange}
-    >
-      {(close) => <RolesForm member={member} onClose={close} {...form} />}
-    </DialogFrame>
+    <FormDialog title={`Roles of ${member.name}`} isOpen={isOpen} onOpenChange={onOpenChange}>
+      <RolesForm member={member} onClose={() => onOpenChange(false)} {...form} />
+    </FormDialog>
   );
 }

@@ -7,6 +7,7 @@ import { TitleBlock } from '@/app/_ui/title-block';
 import type { OwnPeriod, OwnShifts } from '@/modules/roster';
 import { formatClock, formatDay } from '@/modules/units';
 import { ConfirmBox, confirmId } from './confirm-box';
+import { ConfirmNotice } from './confirm-notice';
 import { NextUp } from './next-up';
 import { periodsAhead } from './order-periods';
 import { PeriodSection } from './period-section';
@@ -36,6 +37,7 @@ export function ShiftsView({ first }: { readonly first: OwnShifts }) {
   return (
     <>
       <NextUp own={own} periods={periods} />
+      <ConfirmNotice periods={periods} />
       <div className="grid gap-x-12 desk:grid-cols-2">
         {periods.map((period) => {
           const isAsked = confirming.variables?.versionId === period.versionId;

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { KeyCap } from '@/app/_ui/key-cap';
 import type { FloorRow } from './floor-rows';
 
 /** Below the table: its keys, and what the marks in the row heads mean where there are any. */
@@ -8,10 +8,10 @@ export function GridHints({ rows }: { readonly rows: readonly FloorRow[] }) {
   return (
     <div className="grid gap-1 text-note text-ink2" data-print="off">
       <p className="phone:hidden">
-        <Key>←↑↓→</Key> move, <Key>0–9</Key> type a number, <Key>Enter</Key> keeps it,{' '}
-        <Key>Esc</Key> does not, <Key>Delete</Key> sets 0, <Key>Shift</Key> + arrows select. With
-        several selected <Key>Ctrl R</Key> fills right, <Key>Ctrl D</Key> down. <Key>Ctrl Z</Key>{' '}
-        undo, <Key>Ctrl Y</Key> redo.
+        <KeyCap>←↑↓→</KeyCap> move, <KeyCap>0–9</KeyCap> type a number, <KeyCap>Enter</KeyCap> keeps
+        it, <KeyCap>Esc</KeyCap> does not, <KeyCap>Delete</KeyCap> sets 0, <KeyCap>Shift</KeyCap> +
+        arrows select. With several selected <KeyCap>Ctrl R</KeyCap> fills right,{' '}
+        <KeyCap>Ctrl D</KeyCap> down. <KeyCap>Ctrl Z</KeyCap> undo, <KeyCap>Ctrl Y</KeyCap> redo.
       </p>
       <p className="desk:hidden">
         Tap a number to change it. With “Select several” on, tap the first and the last number to
@@ -29,9 +29,3 @@ export function GridHints({ rows }: { readonly rows: readonly FloorRow[] }) {
     </div>
   );
 }
-
-const Key = ({ children }: { readonly children: ReactNode }) => (
-  <kbd className="border border-edge px-1 text-[0.6875rem] whitespace-nowrap figures">
-    {children}
-  </kbd>
-);

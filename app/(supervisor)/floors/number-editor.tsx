@@ -14,7 +14,10 @@ interface Props {
 
 const typedProblemId = 'typed-problem';
 
-/** The field inside a cell while its number is typed. Leaving it saves, Escape does not. */
+/**
+ * The field inside a cell while its number is typed. Enter and leaving it save, Escape does not; after a
+ * refusal only Enter does.
+ */
 export function NumberEditor({ grid, typed, name }: Props) {
   const field = useRef<HTMLInputElement>(null);
   useLayoutEffect(() => {
@@ -40,7 +43,7 @@ export function NumberEditor({ grid, typed, name }: Props) {
       value={typed.text}
       onChange={(event) => grid.typing.type(event.target.value)}
       onKeyDown={onKeyDown}
-      onBlur={() => grid.finish(null)}
+      onBlur={() => (typed.wasRefused && !typed.problem ? grid.cancel() : grid.finish(null))}
       className="h-8 w-full bg-lift text-center font-[660] outline-[2.5px]! outline-act! outline-offset-[-2.5px]! aria-invalid:outline-short! phone:h-11 phone:text-[1rem]"
     />
   );

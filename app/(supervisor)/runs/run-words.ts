@@ -18,7 +18,7 @@ export function runVerdict(run: RunView): string {
     case 'done':
     case 'stopped':
       return run.proof
-        ? `Run ${run.number}: ${coverVerdict(run)}`
+        ? `Run ${run.number}, ${period}: ${coverVerdict(run)}`
         : `Run ${run.number} was stopped`;
     case 'failed':
       return `Run ${run.number} found no roster to keep`;
@@ -57,5 +57,5 @@ export function stageOneVerdict(run: RunView): string {
   if (shortageMinutes === null) return run.state === 'running' ? 'Looking…' : 'Not found out.';
   const isLeast = shortageBoundMinutes === shortageMinutes;
   if (isLeast) return 'No. This is the least that must stay short.';
-  return run.state === 'running' ? 'Not yet.' : 'Not found out: less may be possible.';
+  return run.state === 'running' ? 'Not yet.' : 'Time ran out: less may be possible.';
 }

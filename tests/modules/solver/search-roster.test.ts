@@ -30,7 +30,7 @@ function search(problem: Problem, watch: Watch = {}) {
       return (watch.solve ?? realSolver)(model, name, options);
     },
     problem,
-    { limitSeconds: 10_000, targetGap: 0, seed: 1, ...watch.options },
+    { limitSeconds: 10_000, targetGap: 0, seed: 1, start: null, ...watch.options },
     {
       clock: () => {
         milliseconds += 1000;
@@ -83,6 +83,21 @@ describe('the way of a search', () => {
       shortageBoundMinutes: 960,
     });
     expect(stages).toEqual(['shortage', 'cost', 'shortage', 'cost']);
+  });
+
+  it('never ends with a worse roster than the one it starts from', () => {
+    const problem = team(4, halfMore, { floors: earlies(6) });
+    const best = search(problem).outcome;
+    if (best.kind !== 'optimal') throw new Error(`expected the optimum, got ${best.kind}`);
+    const outOfTime: LinearSolver = (model, name, options) =>
+      name === 'turn'
+        ? realSolver(model, name, options)
+        : { kind: 'out-of-time', solution: null, bound: Number.NEGATIVE_INFINITY };
+    const { outcome } = search(problem, { solve: outOfTime, options: { start: best.roster } });
+    expect(outcome).toMatchObject({
+      shortageMinutes: best.shortageMinutes,
+      costCents: best.costCents,
+    });
   });
 
   it('gives the shortcut up after its share of the time', () => {

@@ -25,7 +25,7 @@ export function boardFigures(board: Board): StandingFigure[] {
   ];
 }
 
-function payFigures({ proof, maySeePay, currency, run }: Board): StandingFigure[] {
+function payFigures({ proof, maySeePay, currency, run, isRunCurrent }: Board): StandingFigure[] {
   if (!proof || !maySeePay) return [];
   const overtime = (
     <>
@@ -39,7 +39,7 @@ function payFigures({ proof, maySeePay, currency, run }: Board): StandingFigure[
       isScreenOnly: true,
     },
   ];
-  if (run?.boundCents != null && run.bestCostCents === proof.costCents) {
+  if (isRunCurrent && run?.boundCents != null && run.bestCostCents === proof.costCents) {
     figures.push({
       label: 'Proven: not below',
       value: <Money cents={run.boundCents} currency={currency} />,

@@ -21,8 +21,11 @@ function versionWords({ version, zone }: Board): string {
   return `Version ${version.number}, published ${at}${by}.`;
 }
 
-function runWords({ run, proof }: Board): string {
+function runWords({ run, proof, version, isRunCurrent }: Board): string {
   const checked =
     proof && proof.breaches.length === 0 ? ' Re-checked by separate code: 0 problems.' : '';
-  return run ? ` Made by run ${run.number}.${checked}` : checked;
+  if (!run) return checked;
+  const isStale = version.publishedAtUtc === null && !isRunCurrent;
+  const changed = isStale ? ' Floors, people or rules have changed since.' : '';
+  return ` Made by run ${run.number}.${changed}${checked}`;
 }

@@ -5,7 +5,7 @@ import { useState } from 'react';
 import { callApi } from '@/app/_api';
 import { Button } from '@/app/_ui/button';
 import { Caution } from '@/app/_ui/caution';
-import { dateRange } from '@/app/_ui/clock';
+import { dateRange, hours } from '@/app/_ui/clock';
 import { AskDialog } from '@/app/_ui/dialog';
 import { shortPlaces, shortPlaceText } from '@/app/_ui/floor-graphic';
 import { useAnnounce } from '@/app/_ui/live-region';
@@ -31,6 +31,7 @@ export function PublishButton({ board }: { readonly board: Board }) {
     },
   });
   const isClean = shortages.length === 0 && board.proof?.breaches.length === 0;
+  const missing = hours(board.proof?.shortageMinutes ?? 0);
   const people = new Set(board.cells.map(({ personId }) => personId)).size;
   return (
     <>
@@ -43,7 +44,7 @@ export function PublishButton({ board }: { readonly board: Board }) {
       </Button>
       <AskDialog
         title={`Publish the roster of ${dateRange(board.startsOn, board.endsOn)}?`}
-        confirmLabel="Publish"
+        confirmLabel={shortages.length > 0 ? `Publish, short ${missing}` : 'Publish'}
         isOpen={isAsking}
         onOpenChange={setAsking}
         onConfirm={() => publishing.mutate()}
@@ -54,10 +55,12 @@ export function PublishButton({ board }: { readonly board: Board }) {
         </p>
         {shortages.length > 0 ? (
           <>
-            <p className="mt-3 font-[660] text-short">Still short, and published so:</p>
+            <p className="mt-3 font-[660] text-short">Still short {missing}, and published so:</p>
             <ul className="list-disc pl-5">
               {shortages.slice(0, mostListed).map((place) => (
-                <li key={`${place.date} ${place.shiftName}`}>{shortPlaceText(place)}</li>
+                <li key={`${place.date} ${place.shiftName}`}>
+                  {shortPlaceText({ ...place, spare: [] })}
+                </li>
               ))}
             </ul>
             {shortages.length > mostListed ? <p>and {shortages.length - mostListed} more</p> : null}

@@ -1,3 +1,4 @@
+import { hours } from '@/app/_ui/clock';
 import { graphicStateOf, shortPlaces, shortPlaceText } from '@/app/_ui/floor-graphic';
 import type { Board } from '@/modules/roster';
 
@@ -11,7 +12,7 @@ export function ShortageList({ board }: { readonly board: Board }) {
   return (
     <details className="pb-3 text-body">
       <summary className="inline-flex min-h-6 cursor-pointer items-center font-[660] text-short phone:min-h-11">
-        Short on {places.length} {places.length === 1 ? 'shift' : 'shifts'}: see which
+        Short {hours(board.proof?.shortageMinutes ?? 0)}: see where
       </summary>
       <ul className="mt-1 list-disc pl-5">
         {places.slice(0, mostShown).map((place) => (

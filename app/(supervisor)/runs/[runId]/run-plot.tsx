@@ -16,7 +16,7 @@ export function RunPlot({ run }: { readonly run: RunView }) {
         role="img"
         aria-label={plotSentence(run)}
         viewBox={`0 0 ${frame.width} ${frame.height}`}
-        className="w-full text-[0.75rem]"
+        className="w-full text-[0.625rem]"
       >
         {plot.costTicks.map(({ y, cents }) => (
           <g key={cents}>
@@ -31,7 +31,7 @@ export function RunPlot({ run }: { readonly run: RunView }) {
             key={seconds}
             x={x}
             y={frame.height - 6}
-            textAnchor={seconds === 0 ? 'start' : 'middle'}
+            textAnchor={seconds === 0 ? 'start' : x > frame.width - 12 ? 'end' : 'middle'}
             className="fill-ink2"
           >
             {seconds} s

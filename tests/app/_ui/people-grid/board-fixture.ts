@@ -101,6 +101,7 @@ export function smallBoard(changes: Partial<Board> = {}): Board {
     noticeWarning: null,
     notes: [],
     activeRunId: null,
+    isRunCurrent: false,
     run: null,
     ...changes,
   };
