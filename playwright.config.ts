@@ -1,5 +1,5 @@
 import { defineConfig } from '@playwright/test';
-import { chromiumPath } from './tests/support/chromium.mjs';
+import { chromiumPath } from './tests/support/debian-tools.mjs';
 
 const executablePath = chromiumPath();
 if (!executablePath) throw new Error('Browser tests need Chromium: apt-get install -y chromium');

@@ -5,13 +5,18 @@
 import { spawnSync } from 'node:child_process';
 import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { chromiumPath, ensureChromium } from './support/chromium.mjs';
+import { chromiumPath, ensureTools } from './support/debian-tools.mjs';
 
 const results = join('test-results', 'run');
 const totals = { passed: 0, failed: 0 };
 rmSync(results, { recursive: true, force: true });
 mkdirSync(results, { recursive: true });
 
+const missing = ensureTools();
+if (missing.length > 0) {
+  process.stdout.write(`The tests need: apt-get install -y ${missing.join(' ')}\n`);
+  count(0, missing.length);
+}
 check('lint and format', 'biome', ['check', '.']);
 check('route types', 'next', ['typegen'], { NEXT_TELEMETRY_DISABLED: '1' });
 check('types', 'tsc', ['--noEmit', '--incremental', 'false']);
@@ -37,11 +42,7 @@ function unitAndIntegration() {
 }
 
 function browser() {
-  if (!ensureChromium()) {
-    process.stdout.write('Browser tests need Chromium: apt-get install -y chromium\n');
-    count(0, 1);
-    return;
-  }
+  if (!chromiumPath()) return;
   const built = spawnSync(process.execPath, ['app/serve.mjs', '--build-only'], {
     stdio: 'inherit',
   });

@@ -37,7 +37,7 @@ export function ShiftsView({ first }: { readonly first: OwnShifts }) {
   return (
     <>
       <NextUp own={own} periods={periods} />
-      <ConfirmNotice periods={periods} />
+      <ConfirmNotice periods={periods} today={own.today} />
       <div className="grid gap-x-12 desk:grid-cols-2">
         {periods.map((period) => {
           const isAsked = confirming.variables?.versionId === period.versionId;
