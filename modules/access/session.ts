@@ -20,8 +20,15 @@ export const longestMilliseconds = 7 * 24 * 60 * minute;
 const mostFailures = 10;
 const failureWindow = 15 * minute;
 
+/** RFC 5321 allows no longer address; longer passwords only cost time. */
+const longestEmail = 254;
+const longestPassword = 1000;
+
 const failures = new Map<string, number[]>();
 let decoyHash: Promise<string> | undefined;
+
+const doesNotFit = () =>
+  refuse('not-signed-in', 'E-mail and password do not fit together. Check both.');
 
 /**
  * Checks e-mail and password and opens a session. The refusal says the same for an unknown e-mail, a
@@ -33,12 +40,14 @@ export async function signIn(email: string, password: string): Promise<Outcome<S
   if (recent.length >= mostFailures) {
     return refuse('too-many', 'Too many failed tries. Wait 15 minutes and try again.');
   }
+  if (email.length > longestEmail || password.length > longestPassword) return doesNotFit();
+  // Counted before the slow check, so that many tries at once count too.
+  failures.set(key, [...recent, now()]);
   const found = findCredentials(key);
   decoyHash ??= hashPassword('no account has this password');
   const fits = await isPassword(found?.passwordHash ?? (await decoyHash), password);
   if (!found || !fits || found.disabledAtUtc !== null) {
-    failures.set(key, [...recent, now()]);
-    return refuse('not-signed-in', 'E-mail and password do not fit together. Check both.');
+    return doesNotFit();
   }
   failures.delete(key);
   return ok(insertSession(found.userId, now()));

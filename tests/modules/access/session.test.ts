@@ -54,6 +54,12 @@ describe('signing in', () => {
     expect(unknown).toEqual(wrong);
   });
 
+  it('makes an e-mail wait when many passwords are tried at once', async () => {
+    const tries = Array.from({ length: 15 }, () => signIn('many@test.example', 'x'));
+    const codes = (await Promise.all(tries)).map((one) => (one.ok ? 'ok' : one.error.code));
+    expect(codes.filter((code) => code === 'too-many')).toHaveLength(5);
+  });
+
   it('makes an e-mail wait after ten failures', async () => {
     for (let tries = 0; tries < 10; tries++) await signIn('guess@test.example', 'x');
     const outcome = await signIn('guess@test.example', 'x');
