@@ -11,16 +11,6 @@ const ring =
 const tone = (isShort: boolean) =>
   isShort ? 'border-short text-short ring-1 ring-inset ring-offset-0 ring-short' : 'border-ink';
 
-/** A numbered circle in a list: the same number stands on the drawing. */
-export function CallOut({ number, isShort = false }: Look) {
-  return (
-    <span className={`${ring} ${tone(isShort)} shrink-0`}>
-      <span className="sr-only">Call-out </span>
-      {number}
-    </span>
-  );
-}
-
 /** A numbered circle on a drawing that leads to its entry in the list. */
 export function CallOutButton({
   number,

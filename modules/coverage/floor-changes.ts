@@ -4,7 +4,6 @@ import { floorDateSchema, holidayColumn, peopleSchema } from './floor';
 
 /** What a user enters for a date that differs; the date itself stands in the address. */
 export const floorDateInputSchema = floorDateSchema.omit({ date: true });
-export type FloorDateInput = z.infer<typeof floorDateInputSchema>;
 
 /** Cells of the floors table, saved together or not at all. A cell given twice takes the later number. */
 export const floorNeedsSchema = z

@@ -11,7 +11,6 @@ import { endMinuteSchema, startMinuteSchema } from './window';
 
 /** The columns of a weekly pattern: Monday 0 to Sunday 6, then 7 for public holidays. */
 export const patternDays = [0, 1, 2, 3, 4, 5, 6, 7] as const;
-export type PatternDay = (typeof patternDays)[number];
 export const holidayColumn = 7;
 
 /** Least people on duty, 0 to 999. */

@@ -35,14 +35,6 @@ export function objectiveOf(model: LinearModel, name: string): Objective {
   return objective;
 }
 
-/** Value of an objective at a point. */
-export function objectiveValue(objective: Objective, values: ArrayLike<number>): number {
-  return (
-    objective.costs.reduce((sum, cost, column) => sum + cost * (values[column] ?? 0), 0) +
-    objective.offset
-  );
-}
-
 /** The same model with other bounds on one row. */
 export function withRowBounds(
   model: LinearModel,

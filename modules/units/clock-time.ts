@@ -1,8 +1,3 @@
-import { z } from 'zod';
-
-/** Minutes after local midnight, 0 to 1440. */
-export const minuteOfDaySchema = z.int().min(0).max(1440);
-
 /** `HH:MM` of a minute of the day; later days wrap, so 1860 reads `07:00`. */
 export function formatClock(minute: number): string {
   const wrapped = ((minute % 1440) + 1440) % 1440;

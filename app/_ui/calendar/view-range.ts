@@ -58,10 +58,6 @@ export function titleOf(view: View, date: LocalDate): string {
   return dateRangeWithYear(from, to);
 }
 
-/** Whether a date belongs to the month that is shown. */
-export const isInMonth = (date: LocalDate, shown: LocalDate): boolean =>
-  date.slice(0, 7) === shown.slice(0, 7);
-
 const firstOfMonth = (date: LocalDate): LocalDate => `${date.slice(0, 7)}-01`;
 
 /** The last day: the day before the first of the month that contains the 32nd day from the first. */
