@@ -24,8 +24,8 @@ const envSchema = z.object({
   DEMO: z.enum(['on', 'off']).default('on'),
   /** Longest run in seconds. */
   RUN_SECONDS: z.coerce.number().int().min(5).max(3600).default(60),
-  /** Solver threads: one run each. */
-  SOLVER_THREADS: z.coerce.number().int().min(1).max(16).default(1),
+  /** Solver threads: a run uses two when it can, further runs wait. */
+  SOLVER_THREADS: z.coerce.number().int().min(1).max(16).default(2),
   /** ISO instant at which the product's clock starts instead of now: for tests and demonstrations. */
   CLOCK_STARTS_AT: optionalText,
   LOG_LEVEL: z.enum(['debug', 'info', 'warn', 'error', 'silent']).default('info'),

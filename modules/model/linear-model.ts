@@ -50,18 +50,23 @@ export function withRowBounds(
 }
 
 /**
- * The same model with one more objective to be made least: weight x first + second. With a great weight
- * the first comes first, but only nearly: proofs need the two one after the other.
+ * The same model with one more objective to be made least: the sum of weight x objective. With great
+ * weights some come first, but only nearly: proofs need them one after the other.
  */
 export function withBlend(
   model: LinearModel,
   name: string,
-  [first, weight, second]: readonly [first: string, weight: number, second: string],
+  parts: readonly (readonly [objective: string, weight: number])[],
 ): LinearModel {
-  const one = objectiveOf(model, first);
-  const other = objectiveOf(model, second);
-  const costs = one.costs.map((cost, column) => weight * cost + (other.costs[column] ?? 0));
-  const offset = weight * one.offset + other.offset;
+  const costs = new Float64Array(model.columnNames.length);
+  let offset = 0;
+  for (const [part, weight] of parts) {
+    const objective = objectiveOf(model, part);
+    offset += weight * objective.offset;
+    for (const [column, cost] of objective.costs.entries()) {
+      costs[column] = (costs[column] ?? 0) + weight * cost;
+    }
+  }
   return {
     ...model,
     objectives: { ...model.objectives, [name]: { sense: 'minimise', offset, costs } },

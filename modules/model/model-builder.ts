@@ -1,4 +1,5 @@
 import type { LinearModel, Objective } from './linear-model';
+import { SparseRows } from './sparse-rows';
 
 export interface ColumnInput {
   readonly name: string;
@@ -25,16 +26,19 @@ export interface RowInput {
 /** Collects columns and rows one by one and packs them into typed arrays. */
 export class ModelBuilder {
   readonly #columns: ColumnInput[] = [];
-  readonly #rows: RowInput[] = [];
+  readonly #rowNames: string[] = [];
+  readonly #rowLower: number[] = [];
+  readonly #rowUpper: number[] = [];
+  readonly #entries = new SparseRows();
   readonly #legend: string[] = [];
   readonly #offsets = new Map<string, number>();
-  readonly #senses: { readonly [objective: string]: Objective['sense'] };
+  readonly #senses: Map<string, Objective['sense']>;
 
   constructor(
     readonly name: string,
     senses: { readonly [objective: string]: Objective['sense'] },
   ) {
-    this.#senses = senses;
+    this.#senses = new Map(Object.entries(senses));
   }
 
   /** Adds a column and answers its index. */
@@ -43,8 +47,16 @@ export class ModelBuilder {
   }
 
   /** Adds a row and answers its index. */
-  addRow(row: RowInput): number {
-    return this.#rows.push(row) - 1;
+  addRow({ name, lower, upper, entries }: RowInput): number {
+    this.#entries.addRow(entries);
+    this.#rowLower.push(lower ?? Number.NEGATIVE_INFINITY);
+    this.#rowUpper.push(upper ?? Number.POSITIVE_INFINITY);
+    return this.#rowNames.push(name) - 1;
+  }
+
+  /** Adds an objective; costs that columns have under its name count from now on. */
+  addObjective(objective: string, sense: Objective['sense']): void {
+    this.#senses.set(objective, sense);
   }
 
   /** Adds a constant to an objective. */
@@ -59,7 +71,6 @@ export class ModelBuilder {
 
   build(): LinearModel {
     const columns = this.#columns;
-    const rows = this.#rows;
     return {
       name: this.name,
       legend: this.#legend,
@@ -67,39 +78,20 @@ export class ModelBuilder {
       columnLower: Float64Array.from(columns, ({ lower }) => lower ?? 0),
       columnUpper: Float64Array.from(columns, ({ upper }) => upper ?? Number.POSITIVE_INFINITY),
       isInteger: Uint8Array.from(columns, ({ isInteger }) => (isInteger ? 1 : 0)),
-      rowNames: rows.map(({ name }) => name),
-      rowLower: Float64Array.from(rows, ({ lower }) => lower ?? Number.NEGATIVE_INFINITY),
-      rowUpper: Float64Array.from(rows, ({ upper }) => upper ?? Number.POSITIVE_INFINITY),
-      ...packRows(rows),
+      rowNames: this.#rowNames,
+      rowLower: Float64Array.from(this.#rowLower),
+      rowUpper: Float64Array.from(this.#rowUpper),
+      ...this.#entries.pack(),
       objectives: this.#buildObjectives(),
     };
   }
 
   #buildObjectives(): LinearModel['objectives'] {
     return Object.fromEntries(
-      Object.entries(this.#senses).map(([name, sense]) => {
+      [...this.#senses].map(([name, sense]) => {
         const costs = Float64Array.from(this.#columns, (column) => column.costs?.[name] ?? 0);
         return [name, { sense, offset: this.#offsets.get(name) ?? 0, costs }];
       }),
     );
   }
-}
-
-function packRows(rows: readonly RowInput[]): Pick<LinearModel, 'starts' | 'indices' | 'values'> {
-  const starts = new Int32Array(rows.length + 1);
-  rows.forEach((row, index) => {
-    starts[index + 1] = (starts[index] ?? 0) + row.entries.length;
-  });
-  const count = starts[rows.length] ?? 0;
-  const indices = new Int32Array(count);
-  const values = new Float64Array(count);
-  let position = 0;
-  for (const row of rows) {
-    for (const [column, value] of row.entries) {
-      indices[position] = column;
-      values[position] = value;
-      position += 1;
-    }
-  }
-  return { starts, indices, values };
 }

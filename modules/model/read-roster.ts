@@ -1,5 +1,4 @@
 import type { PlannedRoster, ProblemFloor } from '../problem';
-import { overtimeOf } from './pay';
 import type { RosterModel } from './roster-model';
 import type { FloorRow, ShortColumn } from './rows/floor-rows';
 import type { WorkColumn } from './work-columns';
@@ -42,28 +41,6 @@ export function placeRoster(
 }
 
 /**
- * The full point of the model that belongs to the shifts of a solution: every other column at its
- * least. Used as a start for the next solve.
- */
-export function completeValues(model: RosterModel, values: ArrayLike<number>): Float64Array {
-  const whole = new Float64Array(model.linear.columnNames.length);
-  for (const { columns } of model.works) {
-    for (const work of columns) whole[work.column] = isOn(work, values) ? 1 : 0;
-  }
-  for (const { column, days } of model.weekends) {
-    whole[column] = days.flat().some((work) => isOn(work, values)) ? 1 : 0;
-  }
-  model.works.forEach(({ person, columns, personIndex }) => {
-    const column = model.overtimes[personIndex];
-    if (column != null) whole[column] = overtimeOf(person, workedMinutes(columns, values));
-  });
-  for (const floor of model.floors) {
-    for (const [short, missing] of missingIn(floor, values)) whole[short.column] = missing;
-  }
-  return whole;
-}
-
-/**
  * What a roster leaves open, as floors of their own: with them the rest of the people can be planned
  * around it.
  */
@@ -72,7 +49,7 @@ export function openFloors(model: RosterModel, values: ArrayLike<number>): Probl
     const { skillId, counting, startMinute, endMinute } = floor;
     return missingIn(floor, values)
       .filter(([, people]) => people > 0)
-      .map(([{ priceCentsPerHour }, people]) => ({
+      .map(([{ priceCentsPerHour, priority }, people]) => ({
         floorId: 'open',
         dayIndex: 0,
         startMinute,
@@ -81,6 +58,7 @@ export function openFloors(model: RosterModel, values: ArrayLike<number>): Probl
         people,
         counting,
         priceCentsPerHour,
+        priority: priority ?? 1,
       }));
   });
 }

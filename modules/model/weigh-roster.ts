@@ -1,74 +1,104 @@
-import { payFor } from '../units';
+import { completeValues, distancesOf } from './complete-values';
+import type { Level } from './levels';
 import { premiumPay, timePay } from './pay';
-import { isOn, missingIn, workedMinutes } from './read-roster';
+import { isOn, workedMinutes } from './read-roster';
 import type { RosterModel } from './roster-model';
+import { measureAt } from './rows/measures';
+import type { TeamRow } from './rows/team-rows';
+import { pricedStretches } from './weigh-stretches';
+import { refusedPrices } from './wishes';
 
-/** What a roster costs and lacks, in whole cents and minutes, from its shifts alone. */
+/** What a roster costs and lacks, in whole cents, minutes and units, from its shifts alone. */
 export interface RosterFigures {
+  /** In the order of the model's levels. */
+  readonly levels: readonly number[];
+  /** Missing person-minutes of firm floors of every priority. */
   readonly shortageMinutes: number;
   readonly costCents: number;
 }
 
 /** Reckons a solution anew from its shifts, without the errors of the solver's arithmetic. */
 export function weighRoster(model: RosterModel, values: ArrayLike<number>): RosterFigures {
-  const wishedMinutes = new Map<number, number>();
-  let shortageMinutes = 0;
-  for (const floor of model.floors) {
-    for (const [short, missing] of missingIn(floor, values)) {
-      const minutes = missing * (floor.endMinute - floor.startMinute);
-      const price = short.priceCentsPerHour;
-      if (price === null) shortageMinutes += minutes;
-      else wishedMinutes.set(price, (wishedMinutes.get(price) ?? 0) + minutes);
-    }
-  }
-  const wished = [...wishedMinutes].reduce(
-    (sum, [price, minutes]) => sum + payFor(price, minutes),
+  const whole = completeValues(model, values);
+  const payCents = payOf(model, whole);
+  const broken = model.teamRows.map((row) => unitsBroken(model, row, whole, payCents));
+  const levels = model.levels.map((level) => levelValue(model, level, whole, broken));
+  const shortageMinutes = model.levels.reduce(
+    (sum, { name }, index) => sum + (name === 'shortage' ? (levels[index] ?? 0) : 0),
     0,
   );
-  return { shortageMinutes, costCents: payOf(model, values) + wished };
-}
-
-/**
- * How far the objective `cost` of the model can lie from the whole cents of `weighRoster`: half a cent
- * for each sum that is rounded once and whose cents a minute do not always come out whole.
- */
-export function roundingSlackCents(model: RosterModel): number {
-  const { problem } = model;
-  const step = problem.shifts.map(({ paidMinutes }) => paidMinutes).reduce(greatestDivisor, 0);
-  const isWhole = (centsPerHour: number, minutes: number, percent = 100) =>
-    (centsPerHour * minutes * percent) % 6000 === 0;
-  const sums = problem.people.flatMap((person) => {
-    const minutes = [person.contractMinutes, person.creditMinutes].reduce(greatestDivisor, step);
-    const overtime = isWhole(person.payCentsPerHour, minutes, problem.pay.overtimePercent);
-    return person.paidBy === 'contract'
-      ? [overtime]
-      : [overtime, isWhole(person.payCentsPerHour, minutes)];
-  });
-  const prices = model.floors.flatMap(({ startMinute, endMinute, shorts }) =>
-    shorts.map((short) => [short.priceCentsPerHour ?? 0, endMinute - startMinute] as const),
+  const teamCents = model.teamRows.reduce(
+    (sum, { priceCents }, index) => sum + (priceCents ?? 0) * (broken[index] ?? 0),
+    0,
   );
-  const broken = prices.filter(([price, minutes]) => !isWhole(price, minutes));
-  const brokenPrices = new Set(broken.map(([price]) => price)).size;
-  return (sums.filter((whole) => !whole).length + brokenPrices) / 2;
+  return {
+    levels,
+    shortageMinutes,
+    costCents:
+      payCents +
+      pricedStretches(model, whole) +
+      teamCents +
+      wishCents(model, whole) +
+      fairnessCents(model, whole),
+  };
 }
 
-/** The shortage of any roster is a multiple of so many minutes; 1 without firm floors. */
-export function shortageStepMinutes(model: RosterModel): number {
-  const lengths = model.floors
-    .filter(({ shorts }) => shorts.some(({ priceCentsPerHour }) => priceCentsPerHour === null))
-    .map(({ startMinute, endMinute }) => endMinute - startMinute);
-  return lengths.reduce(greatestDivisor, 0) || 1;
+/** Units by which a team row is broken; a budget is held against the pay in whole cents. */
+function unitsBroken(
+  { problem }: RosterModel,
+  row: TeamRow,
+  whole: Float64Array,
+  payCents: number,
+): number {
+  if (row.kind !== 'budget') {
+    const { under, over } = distancesOf(row, whole);
+    return under + over;
+  }
+  const rule = problem.teamRules.find(({ id }) => id === row.ruleId);
+  return rule?.kind === 'budget' ? Math.max(0, payCents - rule.mostCents) : 0;
 }
 
-function greatestDivisor(one: number, other: number): number {
-  return other === 0 ? Math.abs(one) : greatestDivisor(other, one % other);
+function levelValue(
+  { linear, teamRows }: RosterModel,
+  { name, row }: Level,
+  whole: Float64Array,
+  broken: readonly number[],
+): number {
+  if (name === 'teamRules') {
+    return teamRows.reduce(
+      (sum, { priceCents }, index) => sum + (priceCents === null ? (broken[index] ?? 0) : 0),
+      0,
+    );
+  }
+  let sum = 0;
+  for (let at = linear.starts[row] ?? 0; at < (linear.starts[row + 1] ?? 0); at += 1) {
+    sum += (linear.values[at] ?? 0) * (whole[linear.indices[at] ?? 0] ?? 0);
+  }
+  return sum;
 }
 
-function payOf({ problem, works }: RosterModel, values: ArrayLike<number>): number {
+function payOf({ problem, works }: RosterModel, whole: Float64Array): number {
   return works.reduce((sum, { person, columns }) => {
-    const on = columns.filter((work) => isOn(work, values));
+    const on = columns.filter((work) => isOn(work, whole));
     const premiums = on.reduce((cents, { shift }) => cents + premiumPay(problem, person, shift), 0);
-    const { ordinary, overtime } = timePay(problem, person, workedMinutes(columns, values));
+    const { ordinary, overtime } = timePay(problem, person, workedMinutes(columns, whole));
     return sum + premiums + ordinary + overtime;
   }, 0);
+}
+
+const wishCents = ({ works }: RosterModel, whole: Float64Array): number =>
+  works.reduce((sum, { person, columns }) => {
+    const shifts = columns.filter((work) => isOn(work, whole)).map(({ shift }) => shift);
+    return sum + refusedPrices(person, shifts);
+  }, 0);
+
+function fairnessCents({ spreads, shares }: RosterModel, whole: Float64Array): number {
+  const apart = spreads.reduce((sum, { priceCents, people }) => {
+    const counts = people.map((measure) => measureAt(measure, whole));
+    return sum + priceCents * (Math.max(...counts) - Math.min(...counts));
+  }, 0);
+  return shares.reduce(
+    (sum, share) => sum + share.priceCents * Math.max(0, measureAt(share, whole) - share.above),
+    apart,
+  );
 }

@@ -1,7 +1,14 @@
 import { type LinearModel, objectiveOf } from './linear-model';
+import {
+  columnNamesOf,
+  commentsOf,
+  constantName,
+  objectiveNameOf,
+  objectiveTerms,
+  rowNamesOf,
+} from './model-text';
 
 const termsPerLine = 8;
-const lineLength = 200;
 
 /**
  * The model with one objective in the CPLEX LP format, in the common ground of CBC, GLPK and HiGHS: a
@@ -10,20 +17,16 @@ const lineLength = 200;
  */
 export function writeLp(model: LinearModel, objectiveName: string): string {
   const objective = objectiveOf(model, objectiveName);
-  const columns = safeNames(model.columnNames, 'x_');
-  const constant = 'constant_part';
-  const terms = [...objective.costs].flatMap((cost, column) =>
-    cost === 0 ? [] : [term(cost, columns[column] ?? '')],
-  );
-  const comments = [`${model.name}, objective ${objectiveName}`, ...model.legend];
+  const columns = columnNamesOf(model);
+  const terms = objectiveTerms(columns, objective).map(([name, value]) => term(value, name));
   const lines = [
-    ...comments.map((line) => `\\ ${plainText(line)}`),
+    ...commentsOf(model, objectiveName).map((line) => `\\ ${line}`),
     objective.sense === 'minimise' ? 'Minimize' : 'Maximize',
-    ...wrap(`${safeName(objectiveName, 'o_')}:`, [...terms, term(objective.offset, constant)]),
+    ...wrap(`${objectiveNameOf(objectiveName)}:`, terms),
     'Subject To',
     ...writeRows(model, columns),
     'Bounds',
-    ` ${constant} = 1`,
+    ` ${constantName} = 1`,
     ...columns.map((name, column) => writeBounds(model, column, name)),
     ...writeIntegers(model, columns),
     'End',
@@ -32,8 +35,7 @@ export function writeLp(model: LinearModel, objectiveName: string): string {
 }
 
 function writeRows(model: LinearModel, columns: readonly string[]): string[] {
-  const names = safeNames(model.rowNames, 'r_');
-  return names.flatMap((name, row) => {
+  return rowNamesOf(model).flatMap((name, row) => {
     const lower = model.rowLower[row] ?? Number.NEGATIVE_INFINITY;
     const upper = model.rowUpper[row] ?? Number.POSITIVE_INFINITY;
     const terms = termsOf(model, row, columns);
@@ -54,7 +56,7 @@ function writeRows(model: LinearModel, columns: readonly string[]): string[] {
 function termsOf(model: LinearModel, row: number, columns: readonly string[]): string[] {
   const from = model.starts[row] ?? 0;
   const to = model.starts[row + 1] ?? 0;
-  if (from === to) return [term(0, columns[0] ?? 'constant_part')];
+  if (from === to) return [term(0, columns[0] ?? constantName)];
   return Array.from(model.indices.subarray(from, to), (column, index) =>
     term(model.values[from + index] ?? 0, columns[column] ?? ''),
   );
@@ -96,26 +98,3 @@ function wrap(head: string, terms: readonly string[], tail = ''): string[] {
     ].join(' '),
   );
 }
-
-const safeName = (name: string, prefix: string): string => {
-  const kept = name.replace(/[^A-Za-z0-9]+/g, '_').replace(/^_+|_+$/g, '');
-  // A name may not begin with a figure, and one like e12 would be read as a number.
-  return /^[A-Za-z]/.test(kept) && !/^[eE][0-9]/.test(kept) ? kept : `${prefix}${kept}`;
-};
-
-function safeNames(names: readonly string[], prefix: string): string[] {
-  const seen = new Set<string>();
-  return names.map((name, index) => {
-    const safe = safeName(name, prefix);
-    const unique = seen.has(safe) ? `${safe}_${prefix}${index}` : safe;
-    seen.add(unique);
-    return unique;
-  });
-}
-
-/** Comments in plain ASCII on one short line, so that every reader skips them. */
-const plainText = (line: string): string =>
-  line
-    .normalize('NFKD')
-    .replace(/[^\x20-\x7e]/g, '')
-    .slice(0, lineLength);

@@ -1,9 +1,10 @@
+import type { Premiums } from '../rules';
 import { addDays, datesOf, type LocalDate } from '../units';
 import { floorsOn } from './expand-floors';
 import { expandPeople } from './expand-people';
 import { expandShifts } from './expand-shifts';
 import { floorsLeft, type HeldOver } from './floors-left';
-import type { ProblemFloor } from './problem';
+import { type ProblemFloor, type ProblemPay, problemVersion } from './problem';
 import type { AssembledProblem, ProblemParts } from './problem-parts';
 import { axisFrom, type TimeAxis } from './time-axis';
 
@@ -23,7 +24,7 @@ export function assembleProblem(parts: ProblemParts): AssembledProblem {
   const { people, notes: peopleNotes } = expandPeople(parts, shifts, axis);
   return {
     problem: {
-      version: 1,
+      version: problemVersion,
       teamName: team.name,
       zone: team.zone,
       currency: team.currency,
@@ -35,16 +36,30 @@ export function assembleProblem(parts: ProblemParts): AssembledProblem {
       skills: parts.skills.map(({ id, name }) => ({ id, name })),
       shifts: [...shifts],
       floors: expandFloors(parts, dates, isHoliday, axis),
+      ceilings: [],
       people: [...people],
-      rules,
-      pay: {
-        nightPercent: pay.nightPercent,
-        weekendPercent: pay.weekendPercent,
-        holidayPercent: pay.holidayPercent,
-        overtimePercent: pay.overtimePercent,
+      rules: {
+        ...rules,
+        shortestRunDays: null,
+        shortestRunFreeDays: null,
+        kindsThatMayNotFollow: [],
       },
+      teamRules: [],
+      pay: expandPay(pay),
+      fairness: [],
     },
     notes: [...shiftNotes, ...peopleNotes],
+  };
+}
+
+/** The organisation has one percentage for all overtime: a single step from the first minute. */
+function expandPay(pay: Premiums): ProblemPay {
+  const { nightPercent, weekendPercent, holidayPercent, overtimePercent } = pay;
+  return {
+    nightPercent,
+    weekendPercent,
+    holidayPercent,
+    overtimeSteps: [{ overMinutes: 0, percent: overtimePercent }],
   };
 }
 

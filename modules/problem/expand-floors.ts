@@ -21,8 +21,7 @@ export function floorsOn(
     const endMinute = axis.minuteOf(date, floor.endMinute);
     if (people === 0 || endMinute <= startMinute) return [];
     const { id: floorId, skillId, counting, priceCentsPerHour } = floor;
-    return [
-      { floorId, dayIndex, startMinute, endMinute, skillId, people, counting, priceCentsPerHour },
-    ];
+    const window = { dayIndex, startMinute, endMinute };
+    return [{ floorId, ...window, skillId, people, counting, priceCentsPerHour, priority: 1 }];
   });
 }

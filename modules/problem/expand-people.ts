@@ -1,10 +1,10 @@
 import type { Person } from '../people';
-import { addDays, datesOf, daysBetween } from '../units';
+import { addDays, datesOf, daysBetween, type LocalDate } from '../units';
 import { readTerms } from './contract-terms';
 import { usableSkills } from './held-skills';
 import { absencesOf, absencesWithoutContract, creditIn } from './leave-in-period';
 import type { ProblemPerson, ProblemShift } from './problem';
-import { historyDays, type ProblemParts } from './problem-parts';
+import { historyDays, type NeighbourShift, type ProblemParts } from './problem-parts';
 import type { TimeAxis } from './time-axis';
 
 /** The people who can be planned in a period, and in sentences who or what was left out. */
@@ -66,25 +66,39 @@ function expandPerson(
         ...absencesOf(leave, parts, axis),
         ...absencesWithoutContract(terms.datesWithout, axis),
       ],
-      history: historyOf(parts, person, axis),
+      ...neighboursOf(parts, person, axis),
       pins,
+      rules: null,
+      kindLimits: [],
+      wishes: [],
+      isOutside: false,
     },
     notes: [...terms.notes, ...notes, ...pinNotes],
   };
 }
 
-function historyOf(parts: ProblemParts, person: Person, axis: TimeAxis): ProblemPerson['history'] {
-  const from = addDays(parts.startsOn, -historyDays(parts.rules));
-  return parts.history
-    .filter((past) => past.personId === person.id)
-    .filter((past) => past.date >= from && past.date < parts.startsOn)
-    .map((past) => ({
-      dayIndex: daysBetween(parts.startsOn, past.date),
-      startMinute: axis.minuteAt(past.startsAtUtc),
-      endMinute: axis.minuteAt(past.endsAtUtc),
-      isNight: past.isNight,
-    }))
-    .sort((one, other) => one.startMinute - other.startMinute);
+/** Shifts of the days around the period that rest and runs can reach. */
+function neighboursOf(
+  parts: ProblemParts,
+  person: Person,
+  axis: TimeAxis,
+): Pick<ProblemPerson, 'history' | 'following'> {
+  const { startsOn, endsOn } = parts;
+  const reach = historyDays(parts.rules);
+  const between = (shifts: readonly NeighbourShift[], from: LocalDate, to: LocalDate) =>
+    shifts
+      .filter(({ personId, date }) => personId === person.id && date >= from && date <= to)
+      .map((shift) => ({
+        dayIndex: daysBetween(startsOn, shift.date),
+        startMinute: axis.minuteAt(shift.startsAtUtc),
+        endMinute: axis.minuteAt(shift.endsAtUtc),
+        isNight: shift.isNight,
+      }))
+      .sort((one, other) => one.startMinute - other.startMinute);
+  return {
+    history: between(parts.history, addDays(startsOn, -reach), addDays(startsOn, -1)),
+    following: between(parts.following, addDays(endsOn, 1), addDays(endsOn, reach)),
+  };
 }
 
 function pinsOf(

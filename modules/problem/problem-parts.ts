@@ -4,8 +4,8 @@ import type { PayRules, RuleSet } from '../rules';
 import type { LocalDate, PersonId, ShiftKindId, SkillId, UtcMilliseconds, Zone } from '../units';
 import type { Problem } from './problem';
 
-/** A planned or worked shift of the days before the period. */
-export interface PastShift {
+/** A planned or worked shift of the days before the period, or a published one of the days after it. */
+export interface NeighbourShift {
   readonly personId: PersonId;
   /** The local date on which it starts. */
   readonly date: LocalDate;
@@ -39,7 +39,9 @@ export interface ProblemParts {
   /** That touches the period or the day after it. */
   readonly leave: readonly Leave[];
   /** Shifts of the `historyDays` before the period; others are ignored. */
-  readonly history: readonly PastShift[];
+  readonly history: readonly NeighbourShift[];
+  /** Published shifts of the `historyDays` after the period; others are ignored. */
+  readonly following: readonly NeighbourShift[];
   readonly pins: readonly PinnedCell[];
   readonly rules: RuleSet;
   readonly pay: PayRules;
@@ -51,6 +53,9 @@ export interface AssembledProblem {
   readonly notes: readonly string[];
 }
 
-/** Days before a period whose shifts matter to it: a week, or as long as the longest run allowed. */
+/**
+ * Days before and after a period whose shifts matter to it: a week, or as long as the longest run
+ * allowed.
+ */
 export const historyDays = (rules: RuleSet): number =>
   Math.max(7, rules.longestRunDays ?? 0, rules.longestRunNights ?? 0);

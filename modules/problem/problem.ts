@@ -1,6 +1,8 @@
 import { z } from 'zod';
-import { premiumsSchema, ruleSetSchema } from '../rules';
 import { centsSchema, localDateSchema } from '../units';
+import { fairnessTermSchema, wishSchema } from './fairness';
+import { type ProblemRules, problemRulesSchema } from './problem-rules';
+import { teamRuleSchema } from './team-rules';
 
 /*
  * One document holds everything the product knows about one period of one team. The model builder
@@ -12,6 +14,9 @@ import { centsSchema, localDateSchema } from '../units';
 
 const minute = z.int();
 const dayIndex = z.int().min(0);
+
+/** Version of the document; `readProblem` brings older ones up to it. */
+export const problemVersion = 2;
 
 /** A calendar day of the period. `startMinute` is its local midnight on the time axis. */
 export const problemDaySchema = z.strictObject({
@@ -63,6 +68,35 @@ export const problemFloorSchema = z.strictObject({
   counting: z.enum(['seated', 'shared']),
   /** null: firm, must hold. Otherwise wished: the price of one missing person for one hour. */
   priceCentsPerHour: centsSchema.nullable(),
+  /**
+   * Which firm floors go first when not all can hold: shortage on priority 1 is made least before any
+   * on priority 2 is looked at. Of no account for wished floors.
+   */
+  priority: z.int().min(1).max(9),
+});
+
+/**
+ * Most `people` useful over [startMinute, endMinute). Each ceiling stands alone: seated counts people
+ * in the post of the skill (any post without one), shared everybody on duty who holds the skill.
+ */
+export const problemCeilingSchema = z.strictObject({
+  ceilingId: z.string(),
+  dayIndex,
+  startMinute: minute,
+  endMinute: minute,
+  skillId: z.string().nullable(),
+  people: z.int().min(0).max(999),
+  counting: z.enum(['seated', 'shared']),
+  /** null: firm. Otherwise the price of one person too many for one hour. */
+  priceCentsPerHour: centsSchema.nullable(),
+});
+
+const neighbouringShiftSchema = z.strictObject({
+  /** -1 is the day before the period; the number of days is the day after it. */
+  dayIndex: z.int(),
+  startMinute: minute,
+  endMinute: minute,
+  isNight: z.boolean(),
 });
 
 const pinSchema = z.strictObject({
@@ -91,20 +125,43 @@ export const problemPersonSchema = z.strictObject({
   /** Leave and other times at which the person cannot be on duty, half-open. */
   absences: z.array(z.strictObject({ startMinute: minute, endMinute: minute, reason: z.string() })),
   /** Shifts of the days before the period, oldest first, so that rest and runs cross the border. */
-  history: z.array(
-    z.strictObject({
-      /** Negative: -1 is the day before the period. */
-      dayIndex: z.int().max(-1),
-      startMinute: minute,
-      endMinute: minute,
-      isNight: z.boolean(),
-    }),
-  ),
+  history: z.array(neighbouringShiftSchema),
+  /** Shifts already published for the days after the period, oldest first, for the same reason. */
+  following: z.array(neighbouringShiftSchema),
   pins: z.array(pinSchema),
+  /** Limits of this person instead of the team's; null: the team's. Read with `rulesOf`. */
+  rules: problemRulesSchema.nullable(),
+  /** Most shifts of a kind in the period. */
+  kindLimits: z.array(z.strictObject({ kindId: z.string(), most: z.int().min(0) })),
+  wishes: z.array(wishSchema),
+  /**
+   * Outside cover: a place that may be filled from outside at its price. It has no contract hours, keeps
+   * rules like everybody, and fairness leaves it out.
+   */
+  isOutside: z.boolean(),
+});
+
+/** Overtime beyond so many overtime minutes of the period is paid at a percentage of the rate. */
+export const overtimeStepSchema = z.strictObject({
+  overMinutes: z.int().min(0),
+  /** 150 means one and a half times the ordinary rate. */
+  percent: z.int().min(100).max(1000),
+});
+
+/** Premiums add up and are percentages of the ordinary rate; overtime goes by steps. */
+export const problemPaySchema = z.strictObject({
+  nightPercent: z.int().min(0).max(1000),
+  weekendPercent: z.int().min(0).max(1000),
+  holidayPercent: z.int().min(0).max(1000),
+  /** The first begins at 0; both figures rise from step to step. */
+  overtimeSteps: z
+    .array(overtimeStepSchema)
+    .min(1)
+    .refine(isRising, 'Overtime steps begin at 0 minutes and rise in minutes and percent.'),
 });
 
 export const problemSchema = z.strictObject({
-  version: z.literal(1),
+  version: z.literal(problemVersion),
   teamName: z.string(),
   zone: z.string(),
   currency: z.string(),
@@ -112,14 +169,19 @@ export const problemSchema = z.strictObject({
   skills: z.array(problemSkillSchema),
   shifts: z.array(problemShiftSchema),
   floors: z.array(problemFloorSchema),
+  ceilings: z.array(problemCeilingSchema),
   people: z.array(problemPersonSchema),
-  rules: ruleSetSchema,
-  pay: premiumsSchema,
+  rules: problemRulesSchema,
+  teamRules: z.array(teamRuleSchema),
+  pay: problemPaySchema,
+  fairness: z.array(fairnessTermSchema),
 });
 
 export type Problem = z.infer<typeof problemSchema>;
 export type ProblemPerson = z.infer<typeof problemPersonSchema>;
 export type ProblemShift = z.infer<typeof problemShiftSchema>;
+export type ProblemCeiling = z.infer<typeof problemCeilingSchema>;
+export type ProblemPay = z.infer<typeof problemPaySchema>;
 export type ProblemFloor = z.infer<typeof problemFloorSchema>;
 
 /** One person on one shift in one post: the atom of a roster. */
@@ -132,3 +194,15 @@ export type PlannedAssignment = z.infer<typeof assignmentSchema>;
 
 /** A roster of a problem: at most one assignment for each person and day. */
 export type PlannedRoster = readonly PlannedAssignment[];
+
+/** The limits a person keeps: their own, or the team's. */
+export const rulesOf = (problem: Problem, person: ProblemPerson): ProblemRules =>
+  person.rules ?? problem.rules;
+
+function isRising(steps: readonly z.infer<typeof overtimeStepSchema>[]): boolean {
+  return steps.every((step, index) => {
+    const before = steps[index - 1];
+    if (!before) return step.overMinutes === 0;
+    return step.overMinutes > before.overMinutes && step.percent >= before.percent;
+  });
+}

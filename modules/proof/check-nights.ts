@@ -1,3 +1,4 @@
+import { rulesOf } from '../problem';
 import type { Duty, Finding, Subject } from './duties';
 import type { Breach } from './proof';
 import { countWords, dateOfDay, dateWords, firstDate } from './words';
@@ -6,11 +7,13 @@ import { countWords, dateOfDay, dateWords, firstDate } from './words';
 export const nightDuties = (duties: readonly Duty[]): readonly Duty[] =>
   duties.filter(({ shift }) => shift.isNight);
 
-/** Most nights of a person in the period; shifts before it do not count. */
+/** Most Nights of a person in the period; shifts around it do not count. */
 export function checkNights({ problem, dutiesOf }: Subject): Finding {
-  const most = problem.rules.nightsPerPeriod;
-  if (most === null) return { rule: 'nightsPerPeriod', cases: 0, breaches: [] };
+  let cases = 0;
   const breaches = problem.people.flatMap((person): Breach[] => {
+    const most = rulesOf(problem, person).nightsPerPeriod;
+    if (most === null) return [];
+    cases += 1;
     const nights = nightDuties(dutiesOf(person));
     const tooMany = nights[most];
     if (!tooMany) return [];
@@ -18,5 +21,5 @@ export function checkNights({ problem, dutiesOf }: Subject): Finding {
     const sentence = `${person.name}: ${countWords(nights.length, 'night')} in the period from ${dateWords(firstDate(problem))}; the most is ${most}.`;
     return [{ rule: 'nightsPerPeriod', personId: person.id, date, sentence }];
   });
-  return { rule: 'nightsPerPeriod', cases: problem.people.length, breaches };
+  return { rule: 'nightsPerPeriod', cases, breaches };
 }

@@ -1,9 +1,9 @@
-import type { Problem, ProblemPerson } from '../problem';
+import type { Problem, ProblemPerson, ProblemShift } from '../problem';
 import { workedMinutes } from './check-hours';
 import type { Duty, Subject } from './duties';
 import { quotientHalfUp } from './quotient';
 
-/** Pay of a roster in whole cents, without the price of wished floors. */
+/** Pay of a roster in whole cents, without any other price. */
 export interface PayFinding {
   readonly contractPayCents: number;
   readonly premiumPayCents: number;
@@ -13,41 +13,57 @@ export interface PayFinding {
 
 /**
  * Pay of everybody. Ordinary: the contract's minutes, or of people paid by the hour the worked and
- * credited minutes up to the contract. Overtime: worked and credited minutes beyond the contract, at
- * the overtime percentage. Each person's ordinary and overtime pay is rounded once, each premium of
- * each shift once, half up to a whole cent.
+ * credited minutes up to the contract. Overtime: worked and credited minutes beyond the contract, by
+ * steps. Rounded half up to a whole cent, once each: a person's ordinary pay, a person's pay of one
+ * overtime step, each premium of a shift.
  */
 export function provePay({ problem, duties, dutiesOf }: Subject): PayFinding {
   const sum = (amounts: readonly number[]): number =>
     amounts.reduce((total, amount) => total + amount, 0);
-  const overtime = problem.people.map((person) => ({
-    rate: person.payCentsPerHour,
-    minutes: overtimeMinutes(person, dutiesOf(person)),
+  const worked = problem.people.map((person) => ({
+    person,
+    minutes: workedMinutes(dutiesOf(person)),
   }));
   return {
-    contractPayCents: sum(problem.people.map((person) => ordinaryPay(person, dutiesOf(person)))),
-    premiumPayCents: sum(duties.map((duty) => premiumPay(problem, duty))),
+    contractPayCents: sum(worked.map(({ person, minutes }) => ordinaryPay(person, minutes))),
+    premiumPayCents: sum(duties.map(({ person, shift }) => premiumPay(problem, person, shift))),
     overtimePayCents: sum(
-      overtime.map(({ rate, minutes }) => pay(rate, minutes, problem.pay.overtimePercent)),
+      worked.map(({ person, minutes }) => overtimePay(problem, person, minutes)),
     ),
-    overtimeMinutes: sum(overtime.map(({ minutes }) => minutes)),
+    overtimeMinutes: sum(problem.people.map((person) => overtimeMinutes(person, dutiesOf(person)))),
   };
 }
 
 /** Worked and credited minutes beyond the contract. */
 export const overtimeMinutes = (person: ProblemPerson, duties: readonly Duty[]): number =>
-  Math.max(0, workedMinutes(duties) + person.creditMinutes - person.contractMinutes);
+  overtimeOf(person, workedMinutes(duties));
 
-function ordinaryPay(person: ProblemPerson, duties: readonly Duty[]): number {
-  const counted = workedMinutes(duties) + person.creditMinutes;
+const overtimeOf = (person: ProblemPerson, worked: number): number =>
+  Math.max(0, worked + person.creditMinutes - person.contractMinutes);
+
+/** Pay of a person who works so many paid minutes, premiums left out. */
+export const timePay = (problem: Problem, person: ProblemPerson, worked: number): number =>
+  ordinaryPay(person, worked) + overtimePay(problem, person, worked);
+
+function ordinaryPay(person: ProblemPerson, worked: number): number {
   const minutes =
     person.paidBy === 'contract'
       ? person.contractMinutes
-      : Math.min(counted, person.contractMinutes);
+      : Math.min(worked + person.creditMinutes, person.contractMinutes);
   return pay(person.payCentsPerHour, minutes, 100);
 }
 
-function premiumPay(problem: Problem, { person, shift }: Duty): number {
+function overtimePay({ pay: rules }: Problem, person: ProblemPerson, worked: number): number {
+  const overtime = overtimeOf(person, worked);
+  return rules.overtimeSteps.reduce((cents, { overMinutes, percent }, index) => {
+    const until = rules.overtimeSteps[index + 1]?.overMinutes ?? overtime;
+    const minutes = Math.max(0, Math.min(overtime, until) - overMinutes);
+    return cents + pay(person.payCentsPerHour, minutes, percent);
+  }, 0);
+}
+
+/** Night, weekend and holiday premiums of a person on a shift; they add up. */
+export function premiumPay(problem: Problem, person: ProblemPerson, shift: ProblemShift): number {
   const rate = person.payCentsPerHour;
   return (
     pay(rate, shift.nightMinutes, problem.pay.nightPercent) +

@@ -1,20 +1,22 @@
 import type { Problem, ProblemFloor } from '../problem';
+import { coverOf } from './cover';
 import type { Duty } from './duties';
 import { at, axisOf, countByMinute, type Interval } from './minute-counts';
-import { missingMinutes, missingStretches, type Stretch } from './missing-stretches';
-import type { ProvenShortage } from './proof';
+import type { PriorityShortage, ProvenShortage } from './proof';
 import { quotientHalfUp } from './quotient';
+import { findStretches, personMinutes, type Stretch } from './stretches';
 import { dateOfDay } from './words';
 
 /** Where floors are not held, and what the wished ones of them cost. */
 export interface ShortageFinding {
   readonly shortages: readonly ProvenShortage[];
   readonly shortageMinutes: number;
+  readonly shortageByPriority: readonly PriorityShortage[];
   readonly wishedShortageMinutes: number;
   readonly wishedShortageCents: number;
 }
 
-/** Missing people on some floors over one stretch. */
+/** Missing people over one stretch, on floors of one price or of one priority. */
 interface Gap extends Stretch {
   readonly floors: readonly ProblemFloor[];
 }
@@ -32,56 +34,66 @@ export function proveShortage(problem: Problem, duties: readonly Duty[]): Shorta
     ...skillIds.flatMap((skillId) =>
       seatedGaps(
         seated.filter((floor) => floor.skillId === skillId),
-        dutiesInPost(duties, skillId),
+        coverOf(duties, { counting: 'seated', skillId }),
       ),
     ),
     ...floors
       .filter((floor) => floor.counting === 'shared')
-      .flatMap((floor) => sharedGaps(floor, dutiesOfHolders(duties, floor.skillId))),
+      .flatMap((floor) => sharedGaps(floor, coverOf(duties, floor))),
   ].sort((one, other) => one.startMinute - other.startMinute);
   const firm = gaps.filter((gap) => priceOf(gap) === null);
   const wished = gaps.filter((gap) => priceOf(gap) !== null);
   return {
     shortages: gaps.map((gap) => describe(problem, gap)),
-    shortageMinutes: missingMinutes(firm),
-    wishedShortageMinutes: missingMinutes(wished),
+    shortageMinutes: personMinutes(firm),
+    shortageByPriority: prioritiesOf(floors).map((priority) => ({
+      priority,
+      minutes: personMinutes(firm.filter((gap) => gap.floors[0]?.priority === priority)),
+    })),
+    wishedShortageMinutes: personMinutes(wished),
     wishedShortageCents: wished.reduce((sum, gap) => sum + costOf(gap), 0),
   };
 }
 
-const dutiesInPost = (duties: readonly Duty[], skillId: string | null): Interval[] =>
-  duties
-    .filter((duty) => skillId === null || duty.postSkillId === skillId)
-    .map(({ shift }) => shift);
+/** The priorities of the firm ones of some floors, the first to hold first. */
+const prioritiesOf = (floors: readonly ProblemFloor[]): number[] =>
+  [...new Set(floors.filter(isFirm).map(({ priority }) => priority))].sort(
+    (one, other) => one - other,
+  );
 
-const dutiesOfHolders = (duties: readonly Duty[], skillId: string | null): Interval[] =>
-  duties
-    .filter(({ person }) => skillId === null || person.skillIds.includes(skillId))
-    .map(({ shift }) => shift);
+const isFirm = ({ priceCentsPerHour }: ProblemFloor): boolean => priceCentsPerHour === null;
 
-/** Cover serves the firm floors together first, then wished floors, the dearest first. */
+/** Cover serves firm floors by priority, those of one together, then wished floors, the dearest first. */
 function seatedGaps(floors: readonly ProblemFloor[], cover: readonly Interval[]): Gap[] {
   const axis = axisOf(floors);
-  const firm = floors.filter((floor) => floor.priceCentsPerHour === null);
-  const need = countByMinute(axis, firm, (floor) => floor.people);
-  const left = countByMinute(axis, cover).map((have, minute) => have - at(need, minute));
-  const gaps = firmGaps(axis, firm, left);
+  const left = countByMinute(axis, cover);
+  const gaps = prioritiesOf(floors).flatMap((wanted) =>
+    firmGaps(
+      axis,
+      floors.filter((floor) => isFirm(floor) && floor.priority === wanted),
+      left,
+    ),
+  );
   const wished = floors
-    .filter((floor) => floor.priceCentsPerHour !== null)
+    .filter((floor) => !isFirm(floor))
     .sort((one, other) => (other.priceCentsPerHour ?? 0) - (one.priceCentsPerHour ?? 0));
   for (const floor of wished) gaps.push(...wishedGaps(axis, floor, left));
   return gaps;
 }
 
-/** A stretch goes on from one minute to the next where some floor asks for people in both. */
+/**
+ * Takes what the floors use out of `left`. A stretch goes on from one minute to the next where some
+ * floor asks for people in both.
+ */
 function firmGaps(axis: Interval, firm: readonly ProblemFloor[], left: Int32Array): Gap[] {
+  const need = countByMinute(axis, firm, (floor) => floor.people);
   const joints = countByMinute(
     axis,
     firm.map(({ startMinute, endMinute }) => ({ startMinute: startMinute + 1, endMinute })),
   );
-  return missingStretches(
+  return findStretches(
     axis,
-    (minute) => Math.max(0, -at(left, minute - axis.startMinute)),
+    (minute) => serve(left, minute - axis.startMinute, at(need, minute - axis.startMinute)),
     (minute) => at(joints, minute - axis.startMinute) > 0,
   ).map((stretch) => ({
     ...stretch,
@@ -92,18 +104,21 @@ function firmGaps(axis: Interval, firm: readonly ProblemFloor[], left: Int32Arra
 }
 
 /** Takes what the floor uses out of `left`, so that the next floor finds the rest. */
-function wishedGaps(axis: Interval, floor: ProblemFloor, left: Int32Array): Gap[] {
-  return missingStretches(floor, (minute) => {
-    const position = minute - axis.startMinute;
-    const served = Math.min(floor.people, Math.max(0, at(left, position)));
-    left[position] = at(left, position) - served;
-    return floor.people - served;
-  }).map((stretch) => ({ ...stretch, floors: [floor] }));
+const wishedGaps = (axis: Interval, floor: ProblemFloor, left: Int32Array): Gap[] =>
+  findStretches(floor, (minute) => serve(left, minute - axis.startMinute, floor.people)).map(
+    (stretch) => ({ ...stretch, floors: [floor] }),
+  );
+
+/** Takes people for a need out of those left at a position; how many are missing. */
+function serve(left: Int32Array, position: number, need: number): number {
+  const served = Math.min(need, at(left, position));
+  left[position] = at(left, position) - served;
+  return need - served;
 }
 
 function sharedGaps(floor: ProblemFloor, cover: readonly Interval[]): Gap[] {
   const have = countByMinute(floor, cover);
-  return missingStretches(floor, (minute) =>
+  return findStretches(floor, (minute) =>
     Math.max(0, floor.people - at(have, minute - floor.startMinute)),
   ).map((stretch) => ({ ...stretch, floors: [floor] }));
 }
@@ -112,7 +127,7 @@ const priceOf = (gap: Gap): number | null => gap.floors[0]?.priceCentsPerHour ??
 
 /** Missing person-minutes times the price of an hour, rounded once per stretch. */
 const costOf = (gap: Gap): number =>
-  quotientHalfUp(BigInt(missingMinutes([gap])) * BigInt(priceOf(gap) ?? 0), 60n);
+  quotientHalfUp(BigInt(personMinutes([gap])) * BigInt(priceOf(gap) ?? 0), 60n);
 
 function describe(problem: Problem, gap: Gap): ProvenShortage {
   const days = gap.floors.map((floor) => floor.dayIndex);
@@ -122,7 +137,7 @@ function describe(problem: Problem, gap: Gap): ProvenShortage {
     date: dateOfDay(problem, Math.min(...days)),
     startMinute: gap.startMinute,
     endMinute: gap.endMinute,
-    missingPeople: gap.missingPeople,
+    missingPeople: gap.people,
     isFirm: priceOf(gap) === null,
   };
 }

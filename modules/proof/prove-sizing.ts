@@ -1,6 +1,6 @@
 import type { SizingCap, SizingFloor, SizingPattern, SizingProblem } from '../problem';
 import { at } from './minute-counts';
-import { missingMinutes, missingStretches } from './missing-stretches';
+import { findStretches, personMinutes } from './stretches';
 
 /** People on one pattern. */
 export interface SizingHeadcount {
@@ -85,15 +85,15 @@ function shortageOf(
   cycle: number,
   onDuty: Int32Array = new Int32Array(cycle),
 ): SizingProof['shortages'][number] {
-  const stretches = missingStretches(floor, (minute) =>
+  const stretches = findStretches(floor, (minute) =>
     Math.max(0, floor.people - at(onDuty, minute % cycle)),
   );
   return {
     floorId: floor.floorId,
     weekday: floor.weekday,
     label: floor.label,
-    people: Math.max(0, ...stretches.map(({ missingPeople }) => missingPeople)),
-    minutes: missingMinutes(stretches),
+    people: Math.max(0, ...stretches.map(({ people }) => people)),
+    minutes: personMinutes(stretches),
   };
 }
 

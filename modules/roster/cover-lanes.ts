@@ -10,6 +10,9 @@ export interface Duty {
   readonly skillIds: readonly string[];
 }
 
+/** A floor without its rank among firm ones, which changes no cover. */
+type CoverFloor = Omit<ProblemFloor, 'priority'>;
+
 interface Interval {
   readonly startMinute: number;
   readonly endMinute: number;
@@ -22,7 +25,7 @@ interface Interval {
  * and counts everybody who holds the skill. Where both ask, the slot shows the one with more missing.
  */
 export function coverLanes(
-  floors: readonly ProblemFloor[],
+  floors: readonly CoverFloor[],
   duties: readonly Duty[],
   skillIds: readonly SkillId[],
   axisMinutes: number,
@@ -51,7 +54,7 @@ export function axisMinutesOf(
 }
 
 function slotsOf(
-  floors: readonly ProblemFloor[],
+  floors: readonly CoverFloor[],
   duties: readonly Duty[],
   skillId: SkillId | null,
   axisMinutes: number,

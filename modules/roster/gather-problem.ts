@@ -5,7 +5,7 @@ import {
   type AssembledProblem,
   assembleProblem,
   historyDays,
-  type PastShift,
+  type NeighbourShift,
   type PinnedCell,
 } from '../problem';
 import { readPayRules, readRuleSet } from '../rules/server';
@@ -15,13 +15,14 @@ import type { Roster } from './stored';
 
 /**
  * Everything the product knows today about a period, as one problem, and in notes what had to be left
- * out. Shifts of the days before count once published; pins are those of the roster's newest version.
+ * out. Shifts of the days before and after count once published; pins are those of the roster's newest version.
  */
 export function gatherProblem(
   team: TeamInfo,
   { id, startsOn, endsOn }: Pick<Roster, 'startsOn' | 'endsOn'> & { readonly id: RosterId | null },
 ): AssembledProblem {
   const rules = readRuleSet(team.id);
+  const reach = historyDays(rules);
   return assembleProblem({
     team,
     startsOn,
@@ -33,7 +34,8 @@ export function gatherProblem(
     holidays: listHolidays(team.id, addDays(startsOn, -1), addDays(endsOn, 1)),
     people: listPeople(team.id),
     leave: listLeave(team.id, startsOn, addDays(endsOn, 1)),
-    history: historyOf(team.id, addDays(startsOn, -historyDays(rules)), addDays(startsOn, -1)),
+    history: publishedOf(team.id, addDays(startsOn, -reach), addDays(startsOn, -1)),
+    following: publishedOf(team.id, addDays(endsOn, 1), addDays(endsOn, reach)),
     pins: id === null ? [] : pinsOf(id),
     rules,
     pay: readPayRules(team.organisationId),
@@ -51,7 +53,7 @@ function pinsOf(rosterId: RosterId): PinnedCell[] {
     }));
 }
 
-function historyOf(teamId: TeamId, from: LocalDate, to: LocalDate): PastShift[] {
+function publishedOf(teamId: TeamId, from: LocalDate, to: LocalDate): NeighbourShift[] {
   const nights = new Set(
     listShiftKinds(teamId, { withRetired: true })
       .filter(({ isNight }) => isNight)

@@ -1,7 +1,10 @@
 import type { Proof } from '../proof';
 import type { RunEvent } from './views';
 
-/** A proof for eyes that may not see pay: every money field is 0. */
+/**
+ * A proof for eyes that may not see pay: every money field is 0, the units of broken rules of the team
+ * too, since a budget is broken in money, and sentences that tell of pay leave it out.
+ */
 export const withoutPay = (proof: Proof): Proof => ({
   ...proof,
   costCents: 0,
@@ -9,6 +12,16 @@ export const withoutPay = (proof: Proof): Proof => ({
   premiumPayCents: 0,
   overtimePayCents: 0,
   wishedShortageCents: 0,
+  pricedSurplusCents: 0,
+  teamRuleUnits: 0,
+  teamRuleCents: 0,
+  refusedWishCents: 0,
+  spreadCents: 0,
+  shareCents: 0,
+  breaches: proof.breaches.map(({ sentenceWithoutPay, ...breach }) => ({
+    ...breach,
+    sentence: sentenceWithoutPay ?? breach.sentence,
+  })),
 });
 
 /** A report of a run for eyes that may not see pay. */

@@ -10,8 +10,8 @@ export type Verdict =
       readonly state: 'done' | 'stopped';
       readonly roster: PlannedRoster;
       readonly proof: Proof;
-      readonly boundCents: number | null;
-      readonly shortageBoundMinutes: number | null;
+      readonly boundCents: number;
+      readonly shortageBoundMinutes: number;
       readonly isProvenOptimal: boolean;
     }
   | { readonly kind: 'nothing-found'; readonly sentence: string }
@@ -23,9 +23,11 @@ export type Verdict =
     };
 
 /**
- * Judges a solver's answer by the independent re-check. A roster is taken only when it breaks no rule
- * and when its shortage and its cost are what the solver says: the shortage to the minute, the cost to
- * one cent a person, since pay is rounded once a person.
+ * Judges a solver's answer by the independent re-check. A roster is taken only when it breaks no rule,
+ * rules that join people included, and when every figure is what the solver says: shortage and surplus to
+ * the minute, the cost to the cent. Both round the same sums half up (a person's ordinary pay and pay of
+ * an overtime step, a premium of a shift, a longest stretch of one wished floor or priced ceiling), so
+ * that there is no rounding in which they may differ. The bound is whole cents and never above the cost.
  */
 export function judgeOutcome(problem: Problem, outcome: RosterOutcome): Verdict {
   switch (outcome.kind) {
@@ -52,46 +54,66 @@ export function judgeOutcome(problem: Problem, outcome: RosterOutcome): Verdict 
 function judgeRoster(problem: Problem, found: SolvedRoster, kind: RosterOutcome['kind']): Verdict {
   const { roster, boundCents, shortageBoundMinutes } = found;
   const proof = proveRoster(problem, roster);
-  const doubt = findDoubt(problem, found, proof);
+  const doubt = findDoubt(found, proof);
   if (doubt) return { kind: 'refuse', sentence: doubt, roster, proof };
   return {
     kind: 'adopt',
     state: kind === 'stopped' ? 'stopped' : 'done',
     roster,
     proof,
-    boundCents: boundCents === null ? null : Math.min(boundCents, proof.costCents),
+    boundCents,
     shortageBoundMinutes,
     isProvenOptimal: kind === 'optimal',
   };
 }
 
 /** Why a roster cannot be trusted, in one sentence, or null. */
-function findDoubt(problem: Problem, found: SolvedRoster, proof: Proof): string | null {
+function findDoubt(found: SolvedRoster, proof: Proof): string | null {
   const [breach] = proof.breaches;
   if (breach) {
     const more = proof.breaches.length - 1;
     const others = more > 0 ? ` (and ${more} more)` : '';
-    return unsound(`${breach.sentence}${others}`);
+    return unsound(`${breach.sentenceWithoutPay ?? breach.sentence}${others}`);
   }
-  if (found.shortageMinutes !== proof.shortageMinutes) {
-    return unsound(
-      `The solver counts ${found.shortageMinutes} missing minutes, the re-check ${proof.shortageMinutes}.`,
-    );
-  }
-  const wished = proof.shortages.filter(({ isFirm }) => !isFirm).length;
-  const tolerance = problem.people.length + wished;
-  if (Math.abs(found.costCents - proof.costCents) > tolerance) {
-    return unsound(
-      `The solver counts a cost of ${found.costCents} minor units, the re-check ${proof.costCents}.`,
-    );
-  }
-  if (found.boundCents !== null && found.boundCents > proof.costCents + tolerance) {
+  const difference = comparisons(found, proof).find(({ claimed, proven }) => claimed !== proven);
+  if (difference) return unsound(difference.sentence);
+  if (found.boundCents > proof.costCents) {
     return unsound(
       `The solver's bound of ${found.boundCents} lies above the cost of ${proof.costCents} minor units.`,
     );
   }
   return null;
 }
+
+interface Comparison {
+  readonly claimed: number;
+  readonly proven: number;
+  readonly sentence: string;
+}
+
+/** Every figure that the solver gives, beside the one of the re-check. */
+function comparisons(found: SolvedRoster, proof: Proof): Comparison[] {
+  const compare = (claimed: number, proven: number, what: string): Comparison => ({
+    claimed,
+    proven,
+    sentence: `The solver counts ${claimed} ${what}, the re-check ${proven}.`,
+  });
+  const priorities = proof.shortageByPriority;
+  const others = found.levels.slice(0, found.levels.length - priorities.length);
+  const shortages = found.levels.slice(others.length);
+  return [
+    // Levels in which nothing can be wrong are left out by the solver; units of broken rules are none here.
+    compare(sumOf(others), proof.teamRuleUnits + proof.surplusMinutes, 'minutes above ceilings'),
+    ...priorities.map(({ priority, minutes }, index) =>
+      compare(shortages[index] ?? 0, minutes, `missing minutes of priority ${priority}`),
+    ),
+    compare(found.shortageMinutes, proof.shortageMinutes, 'missing minutes'),
+    compare(found.costCents, proof.costCents, 'minor units of cost'),
+  ];
+}
+
+const sumOf = (values: readonly number[]): number =>
+  values.reduce((total, value) => total + value, 0);
 
 const unsound = (finding: string): string =>
   `The independent re-check refused the roster: ${finding} The draft is unchanged.`;

@@ -1,3 +1,4 @@
+import { isDeepStrictEqual } from 'node:util';
 import { now } from '../../db/clock';
 import { type Actor, canInTeam, type TeamInfo } from '../access';
 import { listHolidays } from '../coverage/server';
@@ -122,7 +123,5 @@ function runOf(version: Version, maySeePay: boolean): RunSummary | null {
 
 /** Whether the run that made a version had the floors, people and rules of today; its bound holds for no others. */
 function isRunCurrent({ runId }: Version, problem: Problem): boolean {
-  return (
-    runId !== null && JSON.stringify(readRunDocuments(runId).problem) === JSON.stringify(problem)
-  );
+  return runId !== null && isDeepStrictEqual(readRunDocuments(runId).problem, problem);
 }

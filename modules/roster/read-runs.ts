@@ -48,7 +48,7 @@ export function readRun(actor: Actor, runId: RunId): Outcome<RunView> {
     axisMinutes,
     proof: run.proof && !maySeePay ? withoutPay(run.proof) : run.proof,
     shortageLines: run.proof && !isFailed ? shortageLines(problem, run.proof.shortages) : [],
-    rules: ruleLines(problem.rules),
+    rules: ruleLines(problem),
     mayStop: run.state === 'running' && canInTeam(actor, 'rosters.write', team),
   });
 }

@@ -1,5 +1,14 @@
 import { type Actor, canInTeam } from '../access';
-import { buildRosterModel, withRowBounds, writeLp } from '../model';
+import {
+  buildRosterModel,
+  type Level,
+  type LinearModel,
+  levelSlacks,
+  type RosterModel,
+  withRowBounds,
+  writeLp,
+} from '../model';
+import type { Proof } from '../proof';
 import { type Outcome, ok, type RunId, refuse } from '../units';
 import { requireRun } from './require';
 import { findNewestRunEvent, readRunDocuments } from './store';
@@ -26,10 +35,26 @@ export function readRunModel(actor: Actor, runId: RunId): Outcome<TextFile> {
   if (shortageMinutes === null) {
     return refuse('conflict', 'This run found no roster, so that there is no stage two to write.');
   }
-  const { linear, shortageRow } = buildRosterModel(readRunDocuments(runId).problem);
-  const model = withRowBounds(linear, shortageRow, Number.NEGATIVE_INFINITY, shortageMinutes);
+  const model = buildRosterModel(readRunDocuments(runId).problem);
   return ok({
     fileName: `roster-${run.startsOn}-run-${run.number}.lp`,
-    text: writeLp(model, 'cost'),
+    text: writeLp(fixLevels(model, run.proof, shortageMinutes), 'cost'),
   });
+}
+
+/** The model with at most what the run reached on each level; before a proof only the shortage is known. */
+function fixLevels(model: RosterModel, proof: Proof | null, shortageMinutes: number): LinearModel {
+  const slacks = levelSlacks(model);
+  return model.levels.reduce((fixed, level, index) => {
+    const most = proof ? reachedBy(proof, level) : shortageMinutes;
+    if (!proof && level.name !== 'shortage') return fixed;
+    return withRowBounds(fixed, level.row, Number.NEGATIVE_INFINITY, most + (slacks[index] ?? 0));
+  }, model.linear);
+}
+
+function reachedBy(proof: Proof, { name, priority }: Level): number {
+  if (name === 'teamRules') return proof.teamRuleUnits;
+  if (name === 'surplus') return proof.surplusMinutes;
+  const own = proof.shortageByPriority.find((one) => one.priority === priority);
+  return own?.minutes ?? proof.shortageMinutes;
 }

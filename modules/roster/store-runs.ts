@@ -1,7 +1,8 @@
 import { and, desc, eq, max } from 'drizzle-orm';
 import { db } from '../../db/client';
 import { rosters, runs, users } from '../../db/schema';
-import type { PlannedRoster, Problem } from '../problem';
+import { type PlannedRoster, type Problem, readProblem } from '../problem';
+import { readProof } from '../proof';
 import type { RosterId, RunId, TeamId, UserId } from '../units';
 import type { Run, RunEnd } from './stored';
 
@@ -30,6 +31,11 @@ const selectRuns = () =>
     .innerJoin(rosters, eq(rosters.id, runs.rosterId))
     .innerJoin(users, eq(users.id, runs.startedBy));
 
+type RunRow = NonNullable<ReturnType<ReturnType<typeof selectRuns>['get']>>;
+
+/** A proof may be of an earlier version of the program. */
+const toRun = (row: RunRow): Run => ({ ...row, proof: row.proof && readProof(row.proof) });
+
 /** Starts a run's row with the next number of its roster. */
 export function insertRun(run: {
   readonly id: RunId;
@@ -51,7 +57,8 @@ export function insertRun(run: {
 }
 
 export function findRun(id: RunId): Run | null {
-  return selectRuns().where(eq(runs.id, id)).get() ?? null;
+  const row = selectRuns().where(eq(runs.id, id)).get();
+  return row ? toRun(row) : null;
 }
 
 /** The input of a run and the best roster found; throws for an unknown run. */
@@ -65,7 +72,10 @@ export function readRunDocuments(id: RunId): {
     .where(eq(runs.id, id))
     .get();
   if (!row) throw new Error(`No run ${id}`);
-  return row;
+  // A run of last year holds the problem document of that time.
+  const problem = readProblem(row.problem);
+  if (!problem.ok) throw new Error(`The problem of run ${id}: ${problem.error.detail}`);
+  return { problem: problem.value, roster: row.roster };
 }
 
 /** The runs of a team, newest first. */
@@ -73,19 +83,19 @@ export function listRunsOf(teamId: TeamId): Run[] {
   return selectRuns()
     .where(eq(rosters.teamId, teamId))
     .orderBy(desc(runs.startedAtUtc), desc(runs.number))
-    .all();
+    .all()
+    .map(toRun);
 }
 
 export function findRunningRun(rosterId: RosterId): Run | null {
-  return (
-    selectRuns()
-      .where(and(eq(runs.rosterId, rosterId), eq(runs.state, 'running')))
-      .get() ?? null
-  );
+  const row = selectRuns()
+    .where(and(eq(runs.rosterId, rosterId), eq(runs.state, 'running')))
+    .get();
+  return row ? toRun(row) : null;
 }
 
 export function listRunningRuns(): Run[] {
-  return selectRuns().where(eq(runs.state, 'running')).all();
+  return selectRuns().where(eq(runs.state, 'running')).all().map(toRun);
 }
 
 /** Keeps the best roster so far, so that a crash loses little. */

@@ -49,8 +49,12 @@ function describe(obstacle: Obstacle): string {
       return 'works no Nights by contract';
     case 'no-skill':
       return 'holds no skill that this shift kind takes';
+    case 'kind-limit':
+      return 'may work no shift of this kind';
     case 'rest-after-history':
       return 'has too little rest after the last shift before the period';
+    case 'rest-before-following':
+      return 'has too little rest before the first shift after the period';
     default:
       return assertNever(obstacle);
   }

@@ -7,6 +7,9 @@ import { isWhole, readOutcome, worstBound } from './read-outcome';
 /** Two values of an objective that differ by less are the same. */
 const defaultAbsoluteGap = 1e-6;
 
+/** What HiGHS takes for no limit on a count. */
+const noLimit = 2_147_483_647;
+
 /** Solves a linear model for one of its objectives in HiGHS. Blocks its thread until the end. */
 export function solveLinearModel(
   highs: Highs,
@@ -26,15 +29,26 @@ export function solveLinearModel(
       random_seed: options.seed ?? 0,
       mip_rel_gap: options.targetGap ?? 0,
       mip_abs_gap: absoluteGap,
+      mip_max_nodes: options.nodeLimit ?? noLimit,
+      simplex_iteration_limit: options.iterationLimit ?? noLimit,
     });
     if (options.start) instance.setSolution({ colValue: options.start });
+    if (options.startPart) {
+      const { columns, values } = options.startPart;
+      instance.setSolution({ indices: columns, values });
+    }
     instance.run(callbacks(highs, options));
+    options.onIterations?.(Number(instance.info.get('simplex_iteration_count')));
     const outcome = readOutcome(highs, instance, { model, objective, absoluteGap });
     return outcome === 'unbounded or infeasible' ? tellApart(highs, model, options) : outcome;
   });
 }
 
-function toHighs(highs: Highs, model: LinearModel, { sense, offset, costs }: Objective): ModelData {
+export function toHighs(
+  highs: Highs,
+  model: LinearModel,
+  { sense, offset, costs }: Objective,
+): ModelData {
   const numCols = model.columnNames.length;
   const numRows = model.rowNames.length;
   return {

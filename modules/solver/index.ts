@@ -1,2 +1,6 @@
+export type * from './knots/knot';
+export type * from './knots/way-out';
 export type * from './linear-outcome';
+export type * from './mend/mending';
+export type * from './prices/floor-price';
 export type * from './roster-outcome';

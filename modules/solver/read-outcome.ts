@@ -38,8 +38,10 @@ export function readOutcome(
       return 'unbounded or infeasible';
     case status.timeLimit:
     case status.interrupted:
+    case status.solutionLimit:
+    case status.iterationLimit:
       return {
-        kind: reached === status.timeLimit ? 'out-of-time' : 'interrupted',
+        kind: reached === status.interrupted ? 'interrupted' : 'out-of-time',
         solution:
           instance.info.get('primal_solution_status') === feasible ? readSolution(instance) : null,
         bound: boundOf(instance, solve),

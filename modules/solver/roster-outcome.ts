@@ -1,4 +1,4 @@
-import type { PlannedRoster, SizingAnswer } from '../problem';
+import type { BoundRecord, PlannedRoster, SizingAnswer } from '../problem';
 
 /** One report of a running solve. What is not known yet is null. */
 export interface RosterProgress {
@@ -24,6 +24,12 @@ export interface SolvedRoster {
   readonly boundCents: number;
   /** (cost - bound) / cost; 0 when nothing is paid. */
   readonly gap: number;
+  /** Firm team rules, firm ceilings and firm floors by priority, in the order of the model's levels. */
+  readonly levels: readonly number[];
+  /** What a bound can be reckoned anew from without a solver; null when there is none for this roster. */
+  readonly boundRecord: BoundRecord | null;
+  /** The bound by that record; a search tree may have proven a higher `boundCents`. */
+  readonly recordedBoundCents: number | null;
 }
 
 /** Why a person has no lawful roster at all, whatever the floors ask. */

@@ -1,4 +1,4 @@
-import { MessageChannel } from 'node:worker_threads';
+import { MessageChannel, type MessagePort } from 'node:worker_threads';
 import type { SolverJob, SolverMessage, SolverTask } from './messages';
 import { solverPool } from './pool';
 
@@ -11,6 +11,8 @@ export interface JobOptions {
   readonly limitSeconds: number;
   readonly stop?: AbortSignal | undefined;
   readonly onMessage?: (message: SolverMessage) => void;
+  /** Ports of the job itself. */
+  readonly ports?: readonly MessagePort[];
 }
 
 /** How a job ended on this side: with an answer, by force, or because its thread broke. */
@@ -25,8 +27,9 @@ export async function runJob<T>(job: SolverJob, options: JobOptions): Promise<Jo
   const line = openLine(options, kill);
   try {
     const task: SolverTask = { job, port: line.port, stopFlag: line.stopFlag };
-    const given = { transferList: [line.port], signal: kill.signal };
-    return { kind: 'answered', answer: await solverPool().run(task, given) };
+    const pool = await solverPool();
+    const given = { transferList: [line.port, ...(options.ports ?? [])], signal: kill.signal };
+    return { kind: 'answered', answer: await pool.run(task, given) };
   } catch (cause) {
     const [fault] = line.faults;
     if (fault || !kill.signal.aborted) return { kind: 'broken', cause: fault ?? cause };

@@ -1,19 +1,27 @@
+import { env } from '../../db/env';
 import type { LinearModel } from '../model';
 import type { PlannedRoster, Problem, SizingProblem } from '../problem';
+import { BestOfLanes } from './best-of-lanes';
 import type { LinearOutcome } from './linear-outcome';
-import type {
-  RosterOutcome,
-  RosterProgress,
-  SizingOutcome,
-  SolvedRoster,
-  SolverFailure,
-} from './roster-outcome';
-import { type JobEnd, runJob } from './run-job';
+import type { RosterOutcome, RosterProgress, SizingOutcome, SolvedRoster } from './roster-outcome';
+import { runJob } from './run-job';
+import { runLanes } from './run-lanes';
+import { settle } from './settle';
 
+export * from './analyse';
+export { loosened } from './knots/plan-ways';
+export { withAbsences } from './mend/with-absences';
 export { closeSolver } from './pool';
 
 export interface SolveRosterOptions {
   readonly limitSeconds: number;
+  /**
+   * Nominal seconds of counted work instead of the clock: the same problem, seed, threads and budget then
+   * give the same roster. `limitSeconds` is of no account.
+   */
+  readonly workSeconds?: number;
+  /** Threads the run may use; left out: as many as there are, at most two. */
+  readonly lanes?: 1 | 2;
   /** Relative gap of the cost at which to stop; left out: search to the end. */
   readonly targetGap?: number;
   readonly seed?: number;
@@ -26,27 +34,28 @@ export interface SolveRosterOptions {
   readonly stop?: AbortSignal;
 }
 
-/** Computes a roster in a solver thread: least shortage, then least cost. Never rejects. */
+/** Computes a roster in solver threads: least shortage, then least cost. Never rejects. */
 export async function solveRoster(
   problem: Problem,
   options: SolveRosterOptions,
 ): Promise<RosterOutcome> {
-  const { limitSeconds, targetGap = 0, seed = 0, start = null, stop } = options;
-  let best: SolvedRoster | null = null;
-  const end = await runJob<RosterOutcome>(
-    { kind: 'roster', problem, options: { limitSeconds, targetGap, seed, start } },
-    {
-      limitSeconds,
-      stop,
-      onMessage: (message) => {
-        if (message.kind === 'progress') options.onProgress?.(message.progress);
-        if (message.kind !== 'roster') return;
-        best = message.solved;
+  const { limitSeconds, workSeconds = null, targetGap = 0, seed = 0, start = null } = options;
+  const best = new BestOfLanes();
+  const end = await runLanes({
+    problem,
+    options: { limitSeconds, workSeconds, targetGap, seed, start },
+    lanes: options.lanes ?? (env().SOLVER_THREADS > 1 ? 2 : 1),
+    stop: options.stop,
+    onMessage: (message, lane) => {
+      if (message.kind === 'roster' && best.take(message.solved)) {
         options.onRoster?.(message.solved.roster);
-      },
+      }
+      if (message.kind === 'progress' && lane === 0) {
+        options.onProgress?.(best.tell(message.progress));
+      }
     },
-  );
-  return end.kind === 'killed' ? keepBest(best, end.wasStopped) : settle(end);
+  });
+  return end.kind === 'killed' ? keepBest(best.solved, end.wasStopped) : settle(end);
 }
 
 function keepBest(best: SolvedRoster | null, wasStopped: boolean): RosterOutcome {
@@ -86,13 +95,4 @@ export async function solveLinear(
   if (end.kind !== 'killed') return settle(end);
   const bound = Number.NEGATIVE_INFINITY;
   return { kind: end.wasStopped ? 'interrupted' : 'out-of-time', solution: null, bound };
-}
-
-function settle<T>(end: Exclude<JobEnd<T>, { kind: 'killed' }>): T | SolverFailure {
-  if (end.kind === 'answered') return end.answer;
-  return {
-    kind: 'failed',
-    message: 'The solver broke off; run again, and with fewer people or days if it happens again.',
-    cause: end.cause,
-  };
 }

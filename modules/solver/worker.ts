@@ -1,25 +1,37 @@
 import loadHighs, { type Highs } from 'highs';
+import { workerData } from 'piscina';
+import type { AnalysisAnswer } from './analysis-job';
 import { solveLinearModel } from './highs-adapter';
+import { openHighsSession } from './highs-session';
 import type { LinearOutcome } from './linear-outcome';
-import type { LinearSolver } from './linear-solver';
 import type { SolverMessage, SolverTask } from './messages';
+import type { SolverThreadData } from './pool';
 import type { RosterOutcome, SizingOutcome } from './roster-outcome';
-import { searchRoster } from './search-roster';
+import { runAnalysis } from './run-analysis';
+import { linkPeer, noPeer } from './search/peer-link';
+import { type Lane, type LinearTools, searchLane } from './search/search-lane';
 import { searchSizing } from './search-sizing';
 
 /** One instance for the life of the thread; dropped after a failure, which may have broken it. */
 let loading: Promise<Highs> | null = null;
 
+/** The compiled solver comes with the thread, so that it is compiled once a process. */
+const load = (): Promise<Highs> => loadHighs(workerData as SolverThreadData);
+
 /** The body of a solver thread: does one job and answers its outcome. */
 export default async function work(
   task: SolverTask,
-): Promise<RosterOutcome | SizingOutcome | LinearOutcome> {
-  loading ??= loadHighs();
-  const highs = await loading;
+): Promise<RosterOutcome | SizingOutcome | LinearOutcome | AnalysisAnswer> {
   const send = (message: SolverMessage) => task.port.postMessage(message);
   try {
+    loading ??= load();
+    const highs = await loading;
     send({ kind: 'started' });
-    return run(task, (model, name, options) => solveLinearModel(highs, model, name, options), send);
+    const tools: LinearTools = {
+      solve: (model, name, options) => solveLinearModel(highs, model, name, options),
+      open: (model, name) => openHighsSession(highs, model, name),
+    };
+    return run(task, tools, send);
   } catch (cause) {
     loading = null;
     // The message alone: the stack of the bundled solver prints its whole source line.
@@ -31,15 +43,15 @@ export default async function work(
 
 function run(
   { job, stopFlag }: SolverTask,
-  solve: LinearSolver,
+  tools: LinearTools,
   send: (message: SolverMessage) => void,
-): RosterOutcome | SizingOutcome | LinearOutcome {
+): RosterOutcome | SizingOutcome | LinearOutcome | AnalysisAnswer {
   const flag = new Int32Array(stopFlag);
   const isStopRequested = () => Atomics.load(flag, 0) === 1;
   const clock = () => performance.now();
   switch (job.kind) {
     case 'roster':
-      return searchRoster(solve, job.problem, job.options, {
+      return searchLane(tools, job.problem, job.options, laneOf(job, isStopRequested), {
         isStopRequested,
         clock,
         onProgress: (progress) => send({ kind: 'progress', progress }),
@@ -47,12 +59,27 @@ function run(
       });
     case 'sizing':
       return searchSizing(
-        solve,
+        tools.solve,
         job.problem,
         { limitSeconds: job.limitSeconds, isStopRequested },
         clock,
       );
     case 'linear':
-      return solve(job.model, job.objective, { ...job.options, shouldStop: isStopRequested });
+      return tools.solve(job.model, job.objective, { ...job.options, shouldStop: isStopRequested });
+    default:
+      return runAnalysis({ ...tools, isStopRequested, clock }, job, send);
   }
+}
+
+function laneOf(
+  { lane: { number, peer }, options }: Extract<SolverTask['job'], { kind: 'roster' }>,
+  isStopRequested: () => boolean,
+): Lane {
+  if (!peer) return { number, isAlone: true, peer: noPeer };
+  const isCounted = options.workSeconds !== null;
+  return {
+    number,
+    isAlone: false,
+    peer: linkPeer(peer.port, peer.steps, number, isCounted, isStopRequested),
+  };
 }

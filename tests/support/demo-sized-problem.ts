@@ -1,4 +1,10 @@
-import type { Problem, ProblemFloor, ProblemPerson, ProblemShift } from '@/modules/problem';
+import {
+  type Problem,
+  type ProblemFloor,
+  type ProblemPerson,
+  type ProblemShift,
+  problemVersion,
+} from '@/modules/problem';
 import { addDays, weekdayOf } from '@/modules/units';
 
 /*
@@ -76,7 +82,7 @@ export function demoSizedProblem(change: Partial<Problem> = {}): Problem {
     isHoliday: index === holidayIndex,
   }));
   return {
-    version: 1,
+    version: problemVersion,
     teamName: 'Ravelmere',
     zone: 'Europe/Berlin',
     currency: 'EUR',
@@ -84,6 +90,7 @@ export function demoSizedProblem(change: Partial<Problem> = {}): Problem {
     skills: Object.keys(needs).map((name) => ({ id: name.toLowerCase(), name })),
     shifts: days.flatMap((_, dayIndex) => kinds.map((_kind, kind) => makeShift(dayIndex, kind))),
     floors: days.flatMap((_, dayIndex) => makeFloors(dayIndex)),
+    ceilings: [],
     people: people.map((line, index) => makePerson(index, line)),
     rules: {
       restMinutes: 11 * hour,
@@ -92,8 +99,18 @@ export function demoSizedProblem(change: Partial<Problem> = {}): Problem {
       nightsPerPeriod: 8,
       weekendsPerPeriod: 3,
       weekendCountsFridayNight: false,
+      shortestRunDays: null,
+      shortestRunFreeDays: null,
+      kindsThatMayNotFollow: [],
     },
-    pay: { nightPercent: 25, weekendPercent: 20, holidayPercent: 100, overtimePercent: 150 },
+    teamRules: [],
+    pay: {
+      nightPercent: 25,
+      weekendPercent: 20,
+      holidayPercent: 100,
+      overtimeSteps: [{ overMinutes: 0, percent: 150 }],
+    },
+    fairness: [],
     ...change,
   };
 }
@@ -144,6 +161,7 @@ function makeFloors(dayIndex: number): ProblemFloor[] {
         people: needsThatDiffer[`${dayIndex} ${skill} ${kind.id}`] ?? usual,
         counting: 'seated',
         priceCentsPerHour: null,
+        priority: 1,
       };
     }),
   );
@@ -182,6 +200,11 @@ function makePerson(
       endMinute: (dayIndex + 1) * dayMinutes + 7 * hour,
       isNight: true,
     })),
+    following: [],
     pins: [],
+    rules: null,
+    kindLimits: [],
+    wishes: [],
+    isOutside: false,
   };
 }

@@ -8,32 +8,43 @@ import { join } from 'node:path';
  * test: on Debian, `apt-get install -y coinor-cbc glpk-utils`.
  */
 
-/** Best objective of a model in the CPLEX LP format, or null when it has no solution. */
-export type OutsideSolver = (lp: string) => number | null;
+export type ModelFormat = 'lp' | 'mps';
+
+/** Best objective of a model as text, in the CPLEX LP or free MPS format; null when it has no solution. */
+export type OutsideSolver = (model: string, format?: ModelFormat) => number | null;
 
 /** COIN-OR CBC. Its solution file begins with a sentence on status and objective. */
-export const solveWithCbc: OutsideSolver = (lp) =>
+export const solveWithCbc: OutsideSolver = (text, format = 'lp') =>
   inFolder(
-    lp,
+    text,
+    format,
     'cbc',
     (model, result) => [model, 'solve', 'solution', result],
-    (text) => {
-      const found = /^Optimal - objective value\s+(\S+)/.exec(text);
+    (solution) => {
+      const found = /^Optimal - objective value\s+(\S+)/.exec(solution);
       if (found) return Number(found[1]);
-      if (/^(Infeasible|Integer infeasible)/.test(text)) return null;
-      throw new Error(`cbc ended without an answer: ${text.slice(0, 200)}`);
+      if (/^(Infeasible|Integer infeasible)/.test(solution)) return null;
+      throw new Error(`cbc ended without an answer: ${solution.slice(0, 200)}`);
     },
   );
 
 /** GNU GLPK. The line `s` of its solution file holds sizes, status letters and the objective. */
-export const solveWithGlpk: OutsideSolver = (lp) =>
+export const solveWithGlpk: OutsideSolver = (text, format = 'lp') =>
   inFolder(
-    lp,
+    text,
+    format,
     'glpsol',
-    (model, result) => ['--lp', model, '--tmlim', '60', '--write', result],
-    (text, log) => {
-      const whole = /^s mip \d+ \d+ (\w) (\S+)/m.exec(text);
-      const plain = /^s bas \d+ \d+ (\w) (\w) (\S+)/m.exec(text);
+    (model, result) => [
+      format === 'lp' ? '--lp' : '--freemps',
+      model,
+      '--tmlim',
+      '60',
+      '--write',
+      result,
+    ],
+    (solution, log) => {
+      const whole = /^s mip \d+ \d+ (\w) (\S+)/m.exec(solution);
+      const plain = /^s bas \d+ \d+ (\w) (\w) (\S+)/m.exec(solution);
       if (whole?.[1] === 'o') return Number(whole[2]);
       if (plain?.[1] === 'f' && plain[2] === 'f') return Number(plain[3]);
       if (/HAS NO (PRIMAL |INTEGER )?FEASIBLE SOLUTION|NO PRIMAL FEASIBLE/.test(log)) return null;
@@ -42,16 +53,17 @@ export const solveWithGlpk: OutsideSolver = (lp) =>
   );
 
 function inFolder<T>(
-  lp: string,
+  text: string,
+  format: ModelFormat,
   program: string,
   argumentsOf: (model: string, result: string) => string[],
-  read: (text: string, log: string) => T,
+  read: (solution: string, log: string) => T,
 ): T {
   const folder = mkdtempSync(join(tmpdir(), 'floorwright-lp-'));
   try {
-    const model = join(folder, 'model.lp');
+    const model = join(folder, `model.${format}`);
     const result = join(folder, 'result.txt');
-    writeFileSync(model, lp);
+    writeFileSync(model, text);
     writeFileSync(result, '');
     const run = spawnSync(program, argumentsOf(model, result), { encoding: 'utf8' });
     if (run.error) throw new Error(`${program} could not be started`, { cause: run.error });

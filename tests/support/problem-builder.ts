@@ -1,9 +1,12 @@
-import type {
-  PlannedAssignment,
-  Problem,
-  ProblemFloor,
-  ProblemPerson,
-  ProblemShift,
+import {
+  type PlannedAssignment,
+  type Problem,
+  type ProblemCeiling,
+  type ProblemFloor,
+  type ProblemPerson,
+  type ProblemRules,
+  type ProblemShift,
+  problemVersion,
 } from '@/modules/problem';
 import { addDays, elapsedMinutes, toInstant } from '@/modules/units';
 
@@ -28,7 +31,10 @@ export interface ProblemSketch {
   readonly kinds?: readonly KindSketch[];
   readonly people?: readonly Partial<ProblemPerson>[];
   readonly floors?: readonly Partial<ProblemFloor>[];
-  readonly rules?: Partial<Problem['rules']>;
+  readonly ceilings?: readonly Partial<ProblemCeiling>[];
+  readonly rules?: Partial<ProblemRules>;
+  readonly teamRules?: Problem['teamRules'];
+  readonly fairness?: Problem['fairness'];
   readonly pay?: Partial<Problem['pay']>;
 }
 
@@ -54,7 +60,7 @@ export function buildProblem(sketch: ProblemSketch = {}): Problem {
     elapsedMinutes(origin, toInstant(addDays(startsOn, dayIndex), minute, zone));
   const days = Array.from({ length: dayCount }, (_, dayIndex) => dayIndex);
   return {
-    version: 1,
+    version: problemVersion,
     teamName: 'Ravelmere',
     zone,
     currency: 'EUR',
@@ -68,23 +74,18 @@ export function buildProblem(sketch: ProblemSketch = {}): Problem {
       .flatMap((dayIndex) => kinds.map((kind) => buildShift(kind, dayIndex, minuteOf)))
       .map((shift, index) => ({ ...shift, index })),
     floors: (sketch.floors ?? []).map(buildFloor),
+    ceilings: (sketch.ceilings ?? []).map(buildCeiling),
     people: (sketch.people ?? [{}]).map(buildPerson),
-    rules: {
-      restMinutes: 660,
-      longestRunDays: null,
-      longestRunNights: null,
-      nightsPerPeriod: null,
-      weekendsPerPeriod: null,
-      weekendCountsFridayNight: false,
-      ...sketch.rules,
-    },
+    rules: buildRules(sketch.rules),
+    teamRules: sketch.teamRules ?? [],
     pay: {
       nightPercent: 25,
       weekendPercent: 20,
       holidayPercent: 100,
-      overtimePercent: 150,
+      overtimeSteps: [{ overMinutes: 0, percent: 150 }],
       ...sketch.pay,
     },
+    fairness: sketch.fairness ?? [],
   };
 }
 
@@ -122,9 +123,39 @@ export function buildFloor(floor: Partial<ProblemFloor> = {}, position = 0): Pro
     people: 1,
     counting: 'seated',
     priceCentsPerHour: null,
+    priority: 1,
     ...floor,
   };
 }
+
+/** A ceiling of a test; unless said otherwise a firm, seated one of one nurse from 07:00 to 15:00. */
+export function buildCeiling(ceiling: Partial<ProblemCeiling> = {}, position = 0): ProblemCeiling {
+  return {
+    ceilingId: `ceiling-${position + 1}`,
+    dayIndex: 0,
+    startMinute: 420,
+    endMinute: 900,
+    skillId: 'nurse',
+    people: 1,
+    counting: 'seated',
+    priceCentsPerHour: null,
+    ...ceiling,
+  };
+}
+
+/** Limits of a test: 11 hours of rest and nothing else. */
+export const buildRules = (rules: Partial<ProblemRules> = {}): ProblemRules => ({
+  restMinutes: 660,
+  longestRunDays: null,
+  longestRunNights: null,
+  nightsPerPeriod: null,
+  weekendsPerPeriod: null,
+  weekendCountsFridayNight: false,
+  shortestRunDays: null,
+  shortestRunFreeDays: null,
+  kindsThatMayNotFollow: [],
+  ...rules,
+});
 
 /** A person of a test: a nurse at 25.00 an hour whose hours are free. */
 export function buildPerson(person: Partial<ProblemPerson> = {}, position = 0): ProblemPerson {
@@ -141,7 +172,12 @@ export function buildPerson(person: Partial<ProblemPerson> = {}, position = 0): 
     mayWorkNights: true,
     absences: [],
     history: [],
+    following: [],
     pins: [],
+    rules: null,
+    kindLimits: [],
+    wishes: [],
+    isOutside: false,
     ...person,
   };
 }

@@ -85,6 +85,7 @@ export const partsOf = (parts: Partial<ProblemParts> = {}): ProblemParts => ({
   people: [personOf()],
   leave: [],
   history: [],
+  following: [],
   pins: [],
   rules: {
     restMinutes: 660,

@@ -1,14 +1,19 @@
 import type { Problem, ProblemFloor } from '../../problem';
+import type { CoverIndex } from '../cover-index';
+import { shortageObjective } from '../levels';
 import type { Entry, ModelBuilder } from '../model-builder';
-import { centsPerMinute } from '../pay';
-import { type CoveredSlice, coverSlices, holds, type Stretch, sliceWindows } from '../time-slices';
-import type { PersonWork, WorkColumn } from '../work-columns';
+import { centsFor } from '../pay';
+import { type CoveredSlice, coverSlices, type Stretch, sliceWindows } from '../time-slices';
+import type { WorkColumn } from '../work-columns';
 
-/** People who may be missing in a slice at one price; null: firm. */
+/** People who may be missing in a slice at one price, or of one priority of firm floors. */
 export interface ShortColumn {
   readonly column: number;
   readonly people: number;
+  /** null: firm. */
   readonly priceCentsPerHour: number | null;
+  /** Of firm floors; null: wished. */
+  readonly priority: number | null;
 }
 
 /** A slice of a floor as a row. */
@@ -18,8 +23,13 @@ export interface FloorRow extends Stretch {
   readonly counting: ProblemFloor['counting'];
   /** People asked for, firm and wished together. */
   readonly people: number;
+  /** The floors that ask for them. */
+  readonly floors: readonly ProblemFloor[];
   readonly covering: readonly WorkColumn[];
-  /** In the order in which people go missing: wished ones first, the cheapest first, firm ones last. */
+  /**
+   * In the order in which people go missing: wished ones first, the cheapest first; then firm ones, those
+   * of priority 1 last.
+   */
   readonly shorts: readonly ShortColumn[];
 }
 
@@ -31,25 +41,22 @@ interface FloorGroup extends Pick<FloorRow, 'skillId' | 'counting'> {
 }
 
 /**
- * Floors: cover + short >= people in every slice of time. Rows floor(group, start), columns
- * short(group, start) for firm floors, whose minutes are the objective `shortage`, and
- * short(group, start, price) for wished ones, whose price is part of the objective `cost`. The cover
- * fills firm floors first, then the dearest wished ones. Set covering with shortage as in Dantzig's
- * reply to Edie, JORSA 2(3), 1954.
+ * Floors: cover + short >= people in every slice of time. Rows floor(group, start); columns
+ * short(group, start, firm priority) for firm floors, whose minutes are the objective of their priority,
+ * and short(group, start, price) for wished ones, whose price is part of the objective `cost`. The cover
+ * fills firm floors first, by priority, then the dearest wished ones. Set covering with shortage as in
+ * Dantzig's reply to Edie, JORSA 2(3), 1954.
  */
 export function addFloorRows(
   builder: ModelBuilder,
   problem: Problem,
-  works: readonly PersonWork[],
+  index: CoverIndex,
 ): FloorRow[] {
-  const cuts = problem.shifts.flatMap(({ startMinute, endMinute }) => [startMinute, endMinute]);
   return groupFloors(problem).flatMap((group) => {
-    const onShift = worksByShift(problem, works, group.counts);
-    const coveringOf = (slice: Stretch) =>
-      problem.shifts.flatMap((shift) => (holds(shift, slice) ? (onShift[shift.index] ?? []) : []));
-    return coverSlices(sliceWindows(group.floors, cuts), coveringOf).map((slice) =>
-      addFloorRow(builder, group, slice),
-    );
+    const edges = group.floors.flatMap((floor) => index.edgesWithin(floor));
+    return coverSlices(sliceWindows(group.floors, edges), (slice) =>
+      index.covering(slice, group.counts),
+    ).map((slice) => addFloorRow(builder, group, slice));
   });
 }
 
@@ -85,60 +92,58 @@ function groupFloors(problem: Problem): FloorGroup[] {
   return [...seated, ...shared];
 }
 
-function worksByShift(
-  problem: Problem,
-  works: readonly PersonWork[],
-  counts: (work: WorkColumn) => boolean,
-): WorkColumn[][] {
-  const onShift: WorkColumn[][] = problem.shifts.map(() => []);
-  for (const { columns } of works) {
-    for (const work of columns) if (counts(work)) onShift[work.shift.index]?.push(work);
-  }
-  return onShift;
-}
-
 function addFloorRow(
   builder: ModelBuilder,
   { name, skillId, counting }: FloorGroup,
   slice: CoveredSlice<ProblemFloor, WorkColumn>,
 ): FloorRow {
-  const place = `${name},${slice.startMinute}`;
-  const shorts = neededByPrice(slice.windows).map(([priceCentsPerHour, people]) => ({
-    column: addShortColumn(builder, place, slice, priceCentsPerHour, people),
-    people,
-    priceCentsPerHour,
-  }));
+  const { startMinute, endMinute, covering, windows: floors } = slice;
+  const place = `${name},${startMinute}`;
+  const shorts = neededInOrder(floors).map((needed) =>
+    addShortColumn(builder, place, slice, needed),
+  );
   const people = shorts.reduce((sum, short) => sum + short.people, 0);
   const entries: Entry[] = [
-    ...slice.covering.map(({ column }) => [column, 1] as const),
+    ...covering.map(({ column }) => [column, 1] as const),
     ...shorts.map(({ column }) => [column, 1] as const),
   ];
   const row = builder.addRow({ name: `floor(${place})`, lower: people, entries });
-  const { startMinute, endMinute, covering } = slice;
-  return { row, skillId, counting, startMinute, endMinute, people, covering, shorts };
+  return { row, skillId, counting, startMinute, endMinute, people, floors, covering, shorts };
 }
 
-/** People asked for at each price: wished ones from the cheapest up, then firm ones (null). */
-function neededByPrice(floors: readonly ProblemFloor[]): (readonly [number | null, number])[] {
-  const needed = new Map<number | null, number>();
-  for (const { priceCentsPerHour, people } of floors) {
-    needed.set(priceCentsPerHour, (needed.get(priceCentsPerHour) ?? 0) + people);
+type Needed = Omit<ShortColumn, 'column'>;
+
+/** People asked for at each price and priority, in the order in which they go missing. */
+function neededInOrder(floors: readonly ProblemFloor[]): Needed[] {
+  const needed = new Map<string, Needed>();
+  for (const { priceCentsPerHour, people, ...floor } of floors) {
+    const priority = priceCentsPerHour === null ? floor.priority : null;
+    const key = `${priceCentsPerHour},${priority}`;
+    const before = needed.get(key)?.people ?? 0;
+    needed.set(key, { priceCentsPerHour, priority, people: before + people });
   }
-  const rank = (price: number | null) => price ?? Number.POSITIVE_INFINITY;
-  return [...needed].sort(([one], [other]) => rank(one) - rank(other));
+  const price = (one: Needed) => one.priceCentsPerHour ?? Number.POSITIVE_INFINITY;
+  const priority = (one: Needed) => one.priority ?? 0;
+  return [...needed.values()].sort((one, other) =>
+    price(one) === price(other) ? priority(other) - priority(one) : price(one) - price(other),
+  );
 }
 
 function addShortColumn(
   builder: ModelBuilder,
   place: string,
   { startMinute, endMinute }: Stretch,
-  price: number | null,
-  people: number,
-): number {
+  needed: Needed,
+): ShortColumn {
+  const { priceCentsPerHour: price, priority, people } = needed;
   const minutes = endMinute - startMinute;
-  return builder.addColumn({
-    name: price === null ? `short(${place})` : `short(${place},${price})`,
+  const column = builder.addColumn({
+    name: `short(${place},${price ?? `firm${priority}`})`,
     upper: people,
-    costs: price === null ? { shortage: minutes } : { cost: centsPerMinute(price) * minutes },
+    costs:
+      price === null
+        ? { [shortageObjective(priority ?? 1)]: minutes }
+        : { cost: centsFor(price, minutes) },
   });
+  return { ...needed, column };
 }

@@ -1,7 +1,6 @@
 import type { Problem } from '../../problem';
-import { payFor } from '../../units';
 import type { ModelBuilder } from '../model-builder';
-import { centsPerMinute } from '../pay';
+import { centsFor, type OvertimeStep, overtimeSteps } from '../pay';
 import type { PersonWork } from '../work-columns';
 
 /**
@@ -20,48 +19,44 @@ export function addHoursRow(
   });
 }
 
+/** Overtime minutes of one person within one step, as a column. */
+export interface OvertimeColumn extends OvertimeStep {
+  readonly column: number;
+  /** What a minute adds to the pay that stands on shifts and contract. */
+  readonly centsPerMinute: number;
+}
+
 /**
- * Overtime: overtime(person) >= paid worked minutes + creditMinutes - contractMinutes. Row
- * overtime(person); the column costs overtimePercent of the rate a minute for people paid by contract,
- * and what it adds to ordinary pay for people paid by hours. Answers the column, or null when the
- * contract leaves no room for overtime or it costs nothing. Source: the pay rules.
+ * Overtime: sum of overtime(person, step) >= paid worked minutes + creditMinutes - contractMinutes, each
+ * column at most as long as its step. Row overtime(person). A minute costs the percentage of its step
+ * for people paid by contract, and what it adds to ordinary pay for people paid by hours. Percentages
+ * rise from step to step, so the cheaper step fills first and no whole-number columns are needed: a
+ * convex cost in pieces (Dantzig, Linear Programming and Extensions, 1963, section 24-3). No columns
+ * where the contract leaves no room for overtime or it costs nothing. Source: the pay rules.
  */
 export function addOvertime(
   builder: ModelBuilder,
   problem: Problem,
   { person, personIndex, columns }: PersonWork,
-): number | null {
+): OvertimeColumn[] {
   const room = person.maximumMinutes - person.contractMinutes;
   const ordinaryPercent = person.paidBy === 'contract' ? 0 : 100;
-  const percent = problem.pay.overtimePercent - ordinaryPercent;
-  if (room <= 0 || percent === 0) return null;
-  const column = builder.addColumn({
-    name: `overtime(p${personIndex})`,
-    upper: room,
-    costs: { cost: centsPerMinute(person.payCentsPerHour, percent) },
+  const steps = overtimeSteps(problem.pay).filter(({ overMinutes }) => overMinutes < room);
+  if (steps.every(({ percent }) => percent === ordinaryPercent)) return [];
+  const overtimes = steps.map((step, index) => {
+    const cost = centsFor(person.payCentsPerHour, 1, step.percent - ordinaryPercent);
+    const mostMinutes = Math.min(step.mostMinutes, room - step.overMinutes);
+    const name = `overtime(p${personIndex},${index})`;
+    const column = builder.addColumn({ name, upper: mostMinutes, costs: { cost } });
+    return { ...step, mostMinutes, column, centsPerMinute: cost };
   });
   builder.addRow({
     name: `overtime(p${personIndex})`,
     upper: person.contractMinutes - person.creditMinutes,
     entries: [
-      ...columns.map(({ column: worked, shift }) => [worked, shift.paidMinutes] as const),
-      [column, -1],
+      ...columns.map(({ column, shift }) => [column, shift.paidMinutes] as const),
+      ...overtimes.map(({ column }) => [column, -1] as const),
     ],
   });
-  return column;
-}
-
-/**
- * Ordinary pay that is the same for every roster is a constant of the cost: the contract of people paid
- * by contract, the credited leave of people paid by hours, whose worked minutes stand on their columns.
- * Only the first is a sum by itself, and rounded.
- */
-export function addConstantPay(builder: ModelBuilder, { person }: PersonWork): void {
-  const { payCentsPerHour, contractMinutes, creditMinutes } = person;
-  builder.addOffset(
-    'cost',
-    person.paidBy === 'contract'
-      ? payFor(payCentsPerHour, contractMinutes)
-      : centsPerMinute(payCentsPerHour) * creditMinutes,
-  );
+  return overtimes;
 }

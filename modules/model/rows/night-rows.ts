@@ -1,4 +1,4 @@
-import type { Problem } from '../../problem';
+import { type Problem, rulesOf } from '../../problem';
 import type { ModelBuilder } from '../model-builder';
 import type { PersonWork } from '../work-columns';
 
@@ -7,7 +7,7 @@ import type { PersonWork } from '../work-columns';
  * `ruleSources`.
  */
 export function addNightRow(builder: ModelBuilder, problem: Problem, work: PersonWork): void {
-  const most = problem.rules.nightsPerPeriod;
+  const most = rulesOf(problem, work.person).nightsPerPeriod;
   if (most === null) return;
   const nights = work.columns.filter(({ shift }) => shift.isNight);
   if (nights.length === 0) return;

@@ -59,7 +59,13 @@ describe('a linear model', () => {
   });
 
   it('blends two objectives, constants included', () => {
-    const blend = objectiveOf(withBlend(sample(), 'blend', ['one', 100, 'other']), 'blend');
+    const blend = objectiveOf(
+      withBlend(sample(), 'blend', [
+        ['one', 100],
+        ['other', 1],
+      ]),
+      'blend',
+    );
     expect(blend).toEqual({ sense: 'minimise', offset: 1500, costs: Float64Array.of(200, 3) });
   });
 

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import {
   buildRosterModel,
   completeValues,
+  leastCostCents,
   objectiveOf,
   openFloors,
   placeRoster,
@@ -96,9 +97,42 @@ describe('pay', () => {
     const premiums = 7 * 625 + 500 + 1250;
     expect(weigh(1, { kinds, people: [contract] }, 'Night')).toBe(40_000 + premiums);
   });
+  it('pays overtime by steps, the cheapest first', () => {
+    const overtimeSteps = [
+      { overMinutes: 0, percent: 125 },
+      { overMinutes: 600, percent: 200 },
+    ];
+    // 16 h of overtime at 25.00: 10 h at 31.25 and 6 h at 50.00.
+    const overtime = 10 * 3125 + 6 * 5000;
+    expect(weigh(4, { people: [contract], pay: { overtimeSteps } })).toBe(40_000 + overtime);
+    const hourly = { ...contract, paidBy: 'hours' as const };
+    expect(weigh(4, { people: [hourly], pay: { overtimeSteps } })).toBe(40_000 + overtime);
+  });
+  it('leaves out steps that the contract never reaches', () => {
+    const overtimeSteps = [
+      { overMinutes: 0, percent: 125 },
+      { overMinutes: 600, percent: 200 },
+    ];
+    const columns = (maximumMinutes: number) =>
+      buildRosterModel(
+        buildProblem({ people: [{ ...contract, maximumMinutes }], pay: { overtimeSteps } }),
+      ).overtimes[0]?.map(({ mostMinutes }) => mostMinutes);
+    expect([columns(960), columns(1200), columns(1800)]).toEqual([[], [240], [600, 240]]);
+  });
+  it('counts the wishes that are refused', () => {
+    const wishes = [
+      { dayIndex: 0, shiftIndex: null, wants: 'off' as const, priceCents: 300 },
+      { dayIndex: 1, shiftIndex: 5, wants: 'on' as const, priceCents: 50 },
+      { dayIndex: 2, shiftIndex: 8, wants: 'on' as const, priceCents: 7 },
+    ];
+    // Early on the first three days: the free day and the Day of Tuesday are refused.
+    expect(weigh(3, { people: [{ ...contract, contractMinutes: 1440, wishes }] })).toBe(60_350);
+  });
   it('costs the ordinary rate only where overtime pays no more', () => {
     const hourly = { ...contract, paidBy: 'hours' as const };
-    expect(weigh(4, { people: [hourly], pay: { overtimePercent: 100 } })).toBe(80_000);
+    expect(
+      weigh(4, { people: [hourly], pay: { overtimeSteps: [{ overMinutes: 0, percent: 100 }] } }),
+    ).toBe(80_000);
   });
 });
 
@@ -116,6 +150,18 @@ describe('the slack of rounding', () => {
     expect(slack({ kinds, people: [{ ...odd, paidBy: 'hours' as const }] })).toBe(1);
     const floors = [buildFloor({ priceCentsPerHour: 7, endMinute: 425 })];
     expect(slack({ people: [], floors })).toBe(0.5);
+  });
+});
+
+describe('what no roster can cost less than', () => {
+  it('is the constant, less what wishes to work give back', () => {
+    const wishes = [
+      { dayIndex: 0, shiftIndex: null, wants: 'on' as const, priceCents: 900 },
+      { dayIndex: 1, shiftIndex: 4, wants: 'off' as const, priceCents: 500 },
+    ];
+    const model = buildRosterModel(buildProblem({ people: [{ contractMinutes: 960, wishes }] }));
+    expect(objectiveOf(model.linear, 'cost').offset).toBe(40_900);
+    expect(leastCostCents(model)).toBe(40_000);
   });
 });
 

@@ -1,7 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { buildRosterModel, findObstacle } from '@/modules/model';
+import { buildRosterModel, findObstacle, objectiveOf } from '@/modules/model';
 import type { ProblemPerson } from '@/modules/problem';
-import { buildFloor, buildProblem, type ProblemSketch } from '@/tests/support/problem-builder';
+import {
+  buildFloor,
+  buildProblem,
+  buildRules,
+  type ProblemSketch,
+} from '@/tests/support/problem-builder';
 
 /** What stands between the first person and the Night of Monday (23:00 to 07:00). */
 function obstacle(person: Partial<ProblemPerson>, sketch: ProblemSketch = {}) {
@@ -44,6 +49,22 @@ describe('what keeps a person off a shift', () => {
     expect(obstacle({ history: [last] })).toEqual({ kind: 'rest-after-history' });
     expect(obstacle({ history: [{ ...last, endMinute: 720 }] })).toBeNull();
   });
+  it('is too little rest before a shift published after the period', () => {
+    const next = { dayIndex: 1, startMinute: 2519, endMinute: 3000, isNight: false };
+    expect(obstacle({ following: [next] })).toEqual({ kind: 'rest-before-following' });
+    expect(obstacle({ following: [{ ...next, startMinute: 2520 }] })).toBeNull();
+  });
+  it('is a limit of none of its kind', () => {
+    expect(obstacle({ kindLimits: [{ kindId: 'Night', most: 0 }] })).toEqual({
+      kind: 'kind-limit',
+    });
+    expect(obstacle({ kindLimits: [{ kindId: 'Night', most: 1 }] })).toBeNull();
+  });
+  it('goes by the rest of the person where they have rules of their own', () => {
+    const last = { dayIndex: -1, startMinute: -60, endMinute: 721, isNight: true };
+    const rules = buildRules({ restMinutes: 600 });
+    expect(obstacle({ history: [last], rules })).toBeNull();
+  });
 });
 
 describe('posts', () => {
@@ -66,5 +87,33 @@ describe('posts', () => {
     const pins = [{ dayIndex: 0, shiftIndex: 0, postSkillId: 'desk' }];
     const people = [{ skillIds: ['nurse', 'desk'], pins }];
     expect(postsOnEarly({ people, floors: [buildFloor()] })).toEqual(['nurse', 'desk']);
+  });
+  it('are all that the person holds where a seated ceiling may make another worth having', () => {
+    const people = [{ skillIds: ['desk', 'nurse'] }];
+    const floors = [buildFloor()];
+    expect(postsOnEarly({ people, floors, ceilings: [{}] })).toEqual(['desk', 'nurse']);
+    expect(postsOnEarly({ people, floors, ceilings: [{ skillId: null }] })).toEqual(['nurse']);
+  });
+});
+
+describe('wishes', () => {
+  const wish = { dayIndex: 0, shiftIndex: null, priceCents: 300 };
+  const costsOf = (wishes: ProblemPerson['wishes']) => {
+    const person = { contractMinutes: 0, payCentsPerHour: 0, paidBy: 'hours' as const, wishes };
+    const model = buildRosterModel(buildProblem({ dayCount: 2, people: [person] }));
+    const { costs, offset } = objectiveOf(model.linear, 'cost');
+    return { offset, costs: [...costs.slice(0, 8)] };
+  };
+  it('not to work cost their price on each shift they name', () => {
+    expect(costsOf([{ ...wish, wants: 'off' }])).toEqual({
+      offset: 0,
+      costs: [300, 300, 300, 300, 0, 0, 0, 0],
+    });
+  });
+  it('to work cost it until a shift they name is planned', () => {
+    expect(costsOf([{ ...wish, wants: 'on', shiftIndex: 2 }])).toEqual({
+      offset: 300,
+      costs: [0, 0, -300, 0, 0, 0, 0, 0],
+    });
   });
 });

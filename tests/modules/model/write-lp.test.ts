@@ -53,10 +53,10 @@ it('keeps every line of a roster model short and explains its names', () => {
   const model = buildRosterModel(
     buildProblem({ people: Array.from({ length: 12 }, () => ({})), floors }),
   );
-  const stageTwo = withRowBounds(model.linear, model.shortageRow, 0, 0);
+  const stageTwo = withRowBounds(model.linear, model.levels[0]?.row ?? -1, 0, 0);
   const lines = writeLp(stageTwo, 'cost').split('\n');
   expect(Math.max(...lines.map(({ length }) => length))).toBeLessThan(250);
   expect(lines).toContain('\\ p0 = Ione Baptisto');
   expect(lines).toContain('\\ s4 = 2027-02-02 Early');
-  expect(lines.filter((line) => line.startsWith('  shortage:'))).toHaveLength(1);
+  expect(lines.filter((line) => line.startsWith('  shortage1:'))).toHaveLength(1);
 });

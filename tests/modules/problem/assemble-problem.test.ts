@@ -24,9 +24,9 @@ describe('a problem of one week', () => {
       nightPercent: 25,
       weekendPercent: 20,
       holidayPercent: 100,
-      overtimePercent: 150,
+      overtimeSteps: [{ overMinutes: 0, percent: 150 }],
     });
-    expect(problemOf().rules).toEqual(partsOf().rules);
+    expect(problemOf().rules).toMatchObject(partsOf().rules);
   });
 
   it('can be proved as it stands', () => {
@@ -153,6 +153,7 @@ describe('floors by date', () => {
         people: 1,
         counting: 'seated',
         priceCentsPerHour: 900,
+        priority: 1,
       },
     ]);
   });

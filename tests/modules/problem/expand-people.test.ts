@@ -37,7 +37,12 @@ describe('who can be planned', () => {
         mayWorkNights: true,
         absences: [],
         history: [],
+        following: [],
         pins: [],
+        rules: null,
+        kindLimits: [],
+        wishes: [],
+        isOutside: false,
       },
       notes: [],
     });

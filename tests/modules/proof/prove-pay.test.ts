@@ -77,6 +77,34 @@ describe('ordinary and overtime pay', () => {
     expect(payOf(person, [{ id: 'Short', startMinute: 0, endMinute: 30 }], 5).ordinary).toBe(3);
   });
 
+  it.each([
+    ['within the first step', 120, 120 * 1.25],
+    ['at the end of the first step', 301, 301 * 1.25],
+    ['one minute into the second', 302, 301 * 1.25 + 1.5],
+    ['into the third', 700, 301 * 1.25 + 299 * 1.5 + 100 * 2],
+  ])('goes by steps of overtime: %s', (_, minutes, units) => {
+    const overtimeSteps = [
+      { overMinutes: 0, percent: 125 },
+      { overMinutes: 301, percent: 150 },
+      { overMinutes: 600, percent: 200 },
+    ];
+    // 60.00 an hour is 100 cents a minute.
+    const person = { contractMinutes: 100, payCentsPerHour: 6000 };
+    const kind = { id: 'Long', startMinute: 0, endMinute: 100 + minutes };
+    expect(payOf(person, [kind], 1, { overtimeSteps }).overtime).toBe(units * 100);
+  });
+
+  it('rounds each step of overtime by itself, half up', () => {
+    // 1 cent an hour: 30 minutes at 100 % are half a cent in each of two steps.
+    const overtimeSteps = [
+      { overMinutes: 0, percent: 100 },
+      { overMinutes: 30, percent: 100 },
+    ];
+    const person = { contractMinutes: 0, payCentsPerHour: 1 };
+    const kind = { id: 'Short', startMinute: 0, endMinute: 60 };
+    expect(payOf(person, [kind], 1, { overtimeSteps }).overtime).toBe(2);
+  });
+
   it('stays exact at the largest rates and longest periods', () => {
     const person = { payCentsPerHour: 1_000_000_000, contractMinutes: 500_001 };
     expect(payOf(person, [early], 0).ordinary).toBe(8_333_350_000_000);

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import type { PlannedRoster, Problem } from '@/modules/problem';
 import { proofRules, proveRoster } from '@/modules/proof';
 import { assign, buildProblem, type ProblemSketch } from '@/tests/support/problem-builder';
+import { patternCases } from './pattern-cases';
 import { type Plan, past, ruleCases } from './rule-cases';
 
 /** The roster of Ione Baptisto; the period starts on Mon 1 Feb 2027. */
@@ -16,12 +17,14 @@ const breachesOf = (sketch: ProblemSketch, plan: Plan): { rule: string; sentence
   }));
 };
 
+const cases = [...ruleCases, ...patternCases];
+
 describe('each rule is re-checked', () => {
-  it.each(ruleCases)('$title: held', ({ sketch = {}, held }) => {
+  it.each(cases)('$title: held', ({ sketch = {}, held }) => {
     expect(breachesOf(sketch, held)).toEqual([]);
   });
 
-  it.each(ruleCases)('$title: broken', ({ rule, sketch = {}, broken, sentence }) => {
+  it.each(cases)('$title: broken', ({ rule, sketch = {}, broken, sentence }) => {
     expect(breachesOf(sketch, broken)).toEqual([{ rule, sentence }]);
   });
 
@@ -50,6 +53,38 @@ describe('each rule is re-checked', () => {
     const problem = buildProblem({ rules: { longestRunDays: 2 }, people: [{ history }] });
     const { breaches } = proveRoster(problem, [assign(problem, 'ione', 0, 'Early')]);
     expect(breaches.map(({ date }) => date)).toEqual(['2027-02-01']);
+  });
+
+  it('runs and rest that lie outside the period altogether stand fast', () => {
+    const people = [
+      {
+        history: [-3, -2].map((dayIndex) => past(dayIndex, 420, 900)),
+        following: [7, 8, 9].map((dayIndex) => past(dayIndex, 0, 1400)),
+      },
+    ];
+    expect(breachesOf({ rules: { longestRunDays: 1 }, people }, [[3, 'Early']])).toEqual([]);
+  });
+
+  it('what breaks a rule with the days after the period is told on the last day within it', () => {
+    const following = [past(7, 420, 900)];
+    const problem = buildProblem({ rules: { longestRunDays: 1 }, people: [{ following }] });
+    const { breaches } = proveRoster(problem, planOf(problem, [[6, 'Late']]));
+    expect(breaches.map(({ rule, date }) => [rule, date])).toEqual([
+      ['restMinutes', '2027-02-07'],
+      ['longestRunDays', '2027-02-07'],
+    ]);
+  });
+
+  it('rest to the period after is counted in minutes that truly elapse', () => {
+    // Clocks go forward in the night to 29 March 2026; instants by the IANA zone database.
+    const sketch = {
+      startsOn: '2026-03-22',
+      zone: 'Europe/Berlin',
+      people: [{ following: [past(7, 540, 1020)] }],
+    };
+    expect(breachesOf(sketch, [[6, 'Late']]).map(({ sentence }) => sentence)).toEqual([
+      'Ione Baptisto: Late on Sat 28 Mar ends 23:00 and the shift on Sun 29 Mar starts 10:00, 10 h apart; the least is 11 h.',
+    ]);
   });
 
   it.each([
@@ -85,7 +120,13 @@ describe('each rule is re-checked', () => {
 
   it('counts the work of each person', () => {
     const problem = buildProblem({
-      people: [{ contractMinutes: 900 }, {}],
+      people: [
+        {
+          contractMinutes: 900,
+          wishes: [{ dayIndex: 6, shiftIndex: null, wants: 'off', priceCents: 0 }],
+        },
+        {},
+      ],
       rules: { weekendCountsFridayNight: true },
     });
     const proof = proveRoster(
@@ -96,8 +137,22 @@ describe('each rule is re-checked', () => {
       ]),
     );
     expect(proof.people).toEqual([
-      { personId: 'ione', workedMinutes: 960, overtimeMinutes: 60, nights: 1, weekends: 1 },
-      { personId: 'person-2', workedMinutes: 0, overtimeMinutes: 0, nights: 0, weekends: 0 },
+      {
+        personId: 'ione',
+        workedMinutes: 960,
+        overtimeMinutes: 60,
+        nights: 1,
+        weekends: 1,
+        refusedWishes: 1,
+      },
+      {
+        personId: 'person-2',
+        workedMinutes: 0,
+        overtimeMinutes: 0,
+        nights: 0,
+        weekends: 0,
+        refusedWishes: 0,
+      },
     ]);
   });
 });

@@ -166,3 +166,37 @@ describe('wished floors', () => {
     expect(proof).toMatchObject({ shortageMinutes: 0, wishedShortageCents: 800 });
   });
 });
+
+describe('priorities of firm floors', () => {
+  const floors = [
+    { people: 1, priority: 2 },
+    { people: 2, priority: 1, startMinute: 540, endMinute: 900 },
+    { people: 1, priority: 3, counting: 'shared' as const, skillId: 'desk' },
+  ];
+
+  it('cover serves the first priority first, and each has its minutes', () => {
+    // One nurse from 07:00 to 15:00: from 09:00 on priority 1 takes them and still lacks one.
+    const proof = prove(floors, [['ione', 'Early', 'nurse']]);
+    expect(proof.shortageByPriority).toEqual([
+      { priority: 1, minutes: 360 },
+      { priority: 2, minutes: 360 },
+      { priority: 3, minutes: 480 },
+    ]);
+    expect(proof.shortageMinutes).toBe(1200);
+  });
+
+  it('are listed though nothing is missing, and only for floors that ask for people', () => {
+    const plan = [['ione', 'Early', 'nurse']] as const;
+    expect(prove([{ priority: 4 }, { priority: 2, people: 0 }], plan).shortageByPriority).toEqual([
+      { priority: 4, minutes: 0 },
+    ]);
+  });
+
+  it('of wished floors is of no account', () => {
+    const proof = prove(
+      [{ priority: 9 }, { priority: 1, priceCentsPerHour: 100 }],
+      [['ione', 'Early', 'nurse']],
+    );
+    expect(proof).toMatchObject({ shortageMinutes: 0, wishedShortageMinutes: 480 });
+  });
+});

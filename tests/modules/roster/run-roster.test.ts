@@ -200,7 +200,7 @@ test('the model of stage two is text of the LP format that holds the shortage fo
   const file = mustBeOk(readRunModel(team.supervisor, id));
   expect(file.fileName).toBe('roster-2027-02-01-run-1.lp');
   expect(file.text).toContain('Minimize');
-  expect(file.text.replaceAll(/\s+/g, ' ')).toMatch(/shortage: .*? <= 1920 /);
+  expect(file.text.replaceAll(/\s+/g, ' ')).toMatch(/shortage1: .*? <= 1920 /);
   expect(file.text.trimEnd().endsWith('End')).toBe(true);
 });
 

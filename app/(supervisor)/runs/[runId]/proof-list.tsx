@@ -10,7 +10,10 @@ export function ProofList({ run }: { readonly run: RunView }) {
       <SectionHead id="rules-held">Held in every roster of this run</SectionHead>
       <dl>
         {run.rules.map(({ label, limit, source }) => (
-          <div key={label} className="grid grid-cols-[1fr_auto] gap-x-4 border-b border-rule py-1">
+          <div
+            key={`${label} ${limit}`}
+            className="grid grid-cols-[1fr_auto] gap-x-4 border-b border-rule py-1"
+          >
             <dt>{label}</dt>
             <dd className="font-[640] whitespace-nowrap">{limit}</dd>
             <dd className="col-span-2 text-second text-ink2">{source}</dd>

@@ -1,4 +1,5 @@
 import { drawnDays } from '@/app/_ui/floor-graphic';
+import { readProof } from '@/modules/proof';
 import type { Board, BoardCell, BoardKind, BoardPerson } from '@/modules/roster';
 import type { LocalDate, PersonId, SkillId } from '@/modules/units';
 
@@ -111,7 +112,7 @@ export function smallBoard(changes: Partial<Board> = {}): Board {
 export function proofWith(
   breaches: readonly { readonly personId: PersonId; readonly date: LocalDate }[],
 ): Board['proof'] {
-  return {
+  return readProof({
     costCents: 0,
     contractPayCents: 0,
     premiumPayCents: 0,
@@ -128,5 +129,5 @@ export function proofWith(
     })),
     checked: [],
     people: [],
-  };
+  });
 }

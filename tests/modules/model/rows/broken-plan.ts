@@ -18,7 +18,7 @@ export function broken(sketch: ProblemSketch, plan: Plan): string[] {
 export const days = (from: number, to: number, kind = 'Early'): Plan =>
   Array.from({ length: to - from + 1 }, (_, index) => [from + index, kind] as const);
 
-/** A shift before the period; the day index is negative. */
+/** A shift before the period, with a negative day index, or after it. */
 export const past = (
   dayIndex: number,
   startMinute: number,

@@ -76,6 +76,35 @@ describe('shortage', () => {
     expect(weigh([{ people: 3 }], [['ione', 'Early']])).toMatchObject({ shortageMinutes: 960 });
     expect(weigh([{ people: 2 }], [['ione', 'Day']])).toMatchObject({ shortageMinutes: 600 });
   });
+  it('is a level for each priority of firm floors, and the first one is filled first', () => {
+    const problem = buildProblem({
+      dayCount: 1,
+      people,
+      floors: [{ priority: 4 }, { priority: 2, people: 2 }, wished(600, 1)],
+    });
+    const model = buildRosterModel(problem);
+    expect(model.levels.map(({ objective, step }) => [objective, step])).toEqual([
+      ['shortage2', 120],
+      ['shortage4', 120],
+    ]);
+    const levels = ['ione', 'person-2', 'person-3'].map((_, index, ids) => {
+      const roster = ids.slice(0, index + 1).map((id) => assign(problem, id, 0, 'Early'));
+      return weighRoster(model, placeRoster(model, roster)).levels;
+    });
+    expect(levels).toEqual([
+      [480, 480],
+      [0, 480],
+      [0, 0],
+    ]);
+  });
+  it('of wished floors is rounded once for each floor and stretch', () => {
+    // Two floors at 7 an hour over 10 minutes: 1.17 each; together they would be 2.33.
+    const short = { ...wished(7, 1), endMinute: 430 };
+    expect(weigh([short, short], []).wishedCents).toBe(2);
+    // Person 1 comes at 09:00: 2 h missing 3.5, then 6 h of one missing where two are asked.
+    const long = wished(1, 2);
+    expect(weigh([long], [['ione', 'Day']]).wishedCents).toBe(4 + 6);
+  });
   it('fills firm floors first, then the dearest wished ones', () => {
     const floors = [{ people: 1 }, wished(500, 1), wished(900, 1)];
     expect(weigh(floors, [])).toEqual({ shortageMinutes: 480, wishedCents: 8 * 1400 });
