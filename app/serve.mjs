@@ -1,12 +1,12 @@
 /*
- * `npm start`: makes what is missing (folder, session secret, worker bundle, build), then serves.
+ * `npm start`: makes what is missing (folder, session secret, worker bundles, build), then serves.
  * With --dev the pages are compiled as they are asked for.
  */
 import { spawn } from 'node:child_process';
 import { createHash, randomBytes } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { buildWorker } from '../modules/solver/build-worker.mjs';
+import { buildWorkers } from './build-workers.mjs';
 
 const isDev = process.argv.includes('--dev');
 const port = process.env.PORT || '3000';
@@ -29,7 +29,7 @@ const environment = {
   NEXTAUTH_SECRET: process.env.NEXTAUTH_SECRET || keptSecret(join('var', 'session-secret')),
 };
 
-await buildWorker();
+await buildWorkers();
 if (!isDev) await buildIfChanged();
 if (!process.argv.includes('--build-only')) serve();
 

@@ -10,6 +10,7 @@ import {
 } from 'drizzle-orm/sqlite-core';
 import type { PlannedRoster, Problem } from '../../modules/problem';
 import type { Proof } from '../../modules/proof';
+import type { KnotsAnswer } from '../../modules/solver';
 import type {
   LocalDate,
   PersonId,
@@ -159,6 +160,8 @@ export const runs = sqliteTable(
     isProvenOptimal: integer({ mode: 'boolean' }).notNull().default(false),
     /** What went wrong, in one sentence. */
     failure: text(),
+    /** Why the floors cannot all be held; null where they can, and where nobody looked. */
+    knots: text({ mode: 'json' }).$type<KnotsAnswer>(),
   },
   (table) => [
     uniqueIndex('runs_number').on(table.rosterId, table.number),

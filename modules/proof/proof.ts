@@ -52,6 +52,16 @@ export interface ProvenPerson {
   readonly refusedWishes: number;
 }
 
+/** What became of the bound of the cost when it was reckoned anew. */
+export interface CheckedBound {
+  /** Whole cents, from the record of the solver's prices; null: not reckoned anew. */
+  readonly recheckedCents: number | null;
+  /** The bound that the solver gives; a search tree may have raised it above its record. */
+  readonly solverCents: number | null;
+  /** Which of the two holds and why. It tells of pay. */
+  readonly sentence: string;
+}
+
 /** What the independent re-check found. Recomputed from the problem and the roster alone. */
 export interface Proof {
   /** Pay, wished floors, priced ceilings, priced rules of the team, wishes not granted and fairness. */
@@ -91,4 +101,6 @@ export interface Proof {
   /** Every rule that was re-checked, and how many cases of it. */
   readonly checked: readonly { readonly rule: string; readonly cases: number }[];
   readonly people: readonly ProvenPerson[];
+  /** Of the roster of a run; left out where no run stands behind the roster, and in older proofs. */
+  readonly bound?: CheckedBound;
 }

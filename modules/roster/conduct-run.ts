@@ -12,28 +12,36 @@ import type { ActiveRun } from './active-runs';
 import { adoptRoster, findLostPin } from './adopt-roster';
 import { findLawfulPlan } from './find-lawful-plan';
 import { judgeOutcome, type Verdict } from './judge-outcome';
+import { keepKnots } from './keep-knots';
+import { recheckBound } from './recheck-bound';
 import { reportProgress } from './report-progress';
 import { endRun, keepRunRoster } from './store';
 import type { Run } from './stored';
 
-/** Computes a run to its end and stores what comes of it. Never rejects: what breaks ends the run as failed. */
+/**
+ * Computes a run to its end, stores what comes of it and, when floors are not held, why. Never rejects:
+ * what breaks ends the run as failed.
+ */
 export async function conductRun(
   actor: Actor,
   run: Run,
   problem: Problem,
   active: ActiveRun,
 ): Promise<void> {
+  const stop = active.stop.signal;
   const reporter = reportProgress(run.id, (event) => active.feed.emit('report', event));
   try {
     const outcome = await solveRoster(problem, {
       limitSeconds: run.limitSeconds,
       start: findLawfulPlan(run.rosterId, problem),
-      stop: active.stop.signal,
+      stop,
       onProgress: reporter.report,
       onRoster: (roster) => keepBest(run, roster),
     });
     reporter.flush();
-    settleRun(actor, run, problem, outcome);
+    const verdict = await recheckBound(problem, outcome, judgeOutcome(problem, outcome), stop);
+    settleRun(actor, run, problem, outcome, verdict);
+    await keepKnots(run.id, problem, outcome, verdict, stop);
   } catch (cause) {
     log().error({ err: cause, runId: run.id }, 'run broke off');
     reporter.flush();
@@ -50,8 +58,13 @@ function keepBest(run: Run, roster: PlannedRoster): void {
   }
 }
 
-function settleRun(actor: Actor, run: Run, problem: Problem, outcome: RosterOutcome): void {
-  const verdict = judgeOutcome(problem, outcome);
+function settleRun(
+  actor: Actor,
+  run: Run,
+  problem: Problem,
+  outcome: RosterOutcome,
+  verdict: Verdict,
+): void {
   switch (verdict.kind) {
     case 'adopt':
       settleAdopted(actor, run, problem, verdict);

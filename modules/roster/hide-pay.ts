@@ -3,9 +3,9 @@ import type { RunEvent } from './views';
 
 /**
  * A proof for eyes that may not see pay: every money field is 0, the units of broken rules of the team
- * too, since a budget is broken in money, and sentences that tell of pay leave it out.
+ * too, since a budget is broken in money, sentences that tell of pay leave it out, and the bound is gone.
  */
-export const withoutPay = (proof: Proof): Proof => ({
+export const withoutPay = ({ bound: _bound, ...proof }: Proof): Proof => ({
   ...proof,
   costCents: 0,
   contractPayCents: 0,

@@ -1,16 +1,20 @@
 import { type Actor, canInTeam } from '../access';
 import { requireTeam } from '../access/server';
-import type { PlannedRoster, Problem } from '../problem';
+import { asksPerson, type PlannedRoster, type Problem } from '../problem';
+import type { KnotsAnswer } from '../solver';
 import { type Outcome, ok, type RunId, type SkillId, type TeamId } from '../units';
+import { findActiveRun } from './active-runs';
 import { periodDays } from './axis';
 import { axisMinutesOf, coverLanes, type Duty } from './cover-lanes';
 import { eventWithoutPay, withoutPay } from './hide-pay';
+import type { KnotsView } from './knot-views';
 import { requireRun } from './require';
 import { ruleLines } from './rule-lines';
 import { shortageLines } from './shortage-lines';
 import { listRunEvents, listRunsOf, readRunDocuments } from './store';
 import { summariseRun } from './summarise-run';
 import type { CoverLane, RunSummary, RunView } from './views';
+import { canCompareWays } from './work-out-ways';
 
 /** The runs of a team, newest first. */
 export function listRuns(actor: Actor, teamId: TeamId): Outcome<RunSummary[]> {
@@ -29,7 +33,7 @@ export function readRun(actor: Actor, runId: RunId): Outcome<RunView> {
   if (!found.ok) return found;
   const { run, team } = found.value;
   const maySeePay = canInTeam(actor, 'pay.read', team);
-  const { problem, roster } = readRunDocuments(runId);
+  const { problem, roster, knots } = readRunDocuments(runId);
   const days = periodDays(run.startsOn, run.endsOn, team.zone);
   const isFailed = run.state === 'failed';
   const duties = dutiesOf(problem, isFailed ? [] : (roster ?? []));
@@ -37,6 +41,8 @@ export function readRun(actor: Actor, runId: RunId): Outcome<RunView> {
   const skillIds = problem.skills.map(({ id }) => id as SkillId);
   const lanes = coverLanes(problem.floors, duties, skillIds, axisMinutes);
   const events = listRunEvents(runId, 0);
+  const mayWrite = canInTeam(actor, 'rosters.write', team);
+  const isActive = findActiveRun(runId) !== null;
   return ok({
     ...summariseRun(run, maySeePay),
     currency: problem.currency,
@@ -49,9 +55,24 @@ export function readRun(actor: Actor, runId: RunId): Outcome<RunView> {
     proof: run.proof && !maySeePay ? withoutPay(run.proof) : run.proof,
     shortageLines: run.proof && !isFailed ? shortageLines(problem, run.proof.shortages) : [],
     rules: ruleLines(problem),
-    mayStop: run.state === 'running' && canInTeam(actor, 'rosters.write', team),
+    knots: knots && knotsView(knots),
+    isLookingForKnots: run.state !== 'running' && isActive,
+    mayWorkOut: mayWrite && canCompareWays(run, roster),
+    mayStop: mayWrite && (run.state === 'running' || isActive),
   });
 }
+
+const knotsView = ({ knots, isComplete }: KnotsAnswer): KnotsView => ({
+  knots: knots.map(({ sentence, members, words, isMinimal }) => ({
+    sentence,
+    isMinimal,
+    members: members.map((member, index) => ({
+      words: words[index] ?? '',
+      asksPerson: asksPerson(member),
+    })),
+  })),
+  isComplete,
+});
 
 /** Who is on duty when, on the time axis of the problem. */
 function dutiesOf(problem: Problem, roster: PlannedRoster): Duty[] {

@@ -22,3 +22,11 @@ export type PublishInput = z.infer<typeof publishSchema>;
 /** Confirming one published version. */
 export const confirmSchema = z.strictObject({ versionId: idSchema('ver') });
 export type ConfirmInput = z.infer<typeof confirmSchema>;
+
+/** Text formats of a run's model; without a word the LP format. */
+export const modelQuerySchema = z.strictObject({ format: z.enum(['lp', 'mps']).default('lp') });
+export type ModelFormat = z.infer<typeof modelQuerySchema>['format'];
+
+/** Ways out of one knot of a run, by its place in the list. */
+export const waysOutSchema = z.strictObject({ knot: z.int().min(0).max(1000) });
+export type WaysOutInput = z.infer<typeof waysOutSchema>;

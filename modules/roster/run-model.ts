@@ -7,10 +7,12 @@ import {
   type RosterModel,
   withRowBounds,
   writeLp,
+  writeMps,
 } from '../model';
 import type { Proof } from '../proof';
 import { type Outcome, ok, type RunId, refuse } from '../units';
 import { requireRun } from './require';
+import type { ModelFormat } from './roster-input';
 import { findNewestRunEvent, readRunDocuments } from './store';
 
 /** A text file and the name it is saved under. */
@@ -19,11 +21,13 @@ export interface TextFile {
   readonly text: string;
 }
 
+const writers = { lp: writeLp, mps: writeMps };
+
 /**
- * The model of a run's stage two in the CPLEX LP format, so that any solver can check the run: least
- * cost with the shortage at most what the run found. It holds pay.
+ * The model of a run's stage two in the CPLEX LP or the free MPS format, so that any solver can check
+ * the run: least cost with the shortage at most what the run found. It holds pay.
  */
-export function readRunModel(actor: Actor, runId: RunId): Outcome<TextFile> {
+export function readRunModel(actor: Actor, runId: RunId, format: ModelFormat): Outcome<TextFile> {
   const found = requireRun(actor, 'rosters.read', runId);
   if (!found.ok) return found;
   const { run, team } = found.value;
@@ -37,8 +41,8 @@ export function readRunModel(actor: Actor, runId: RunId): Outcome<TextFile> {
   }
   const model = buildRosterModel(readRunDocuments(runId).problem);
   return ok({
-    fileName: `roster-${run.startsOn}-run-${run.number}.lp`,
-    text: writeLp(fixLevels(model, run.proof, shortageMinutes), 'cost'),
+    fileName: `roster-${run.startsOn}-run-${run.number}.${format}`,
+    text: writers[format](fixLevels(model, run.proof, shortageMinutes), 'cost'),
   });
 }
 

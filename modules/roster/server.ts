@@ -18,3 +18,4 @@ export { readRunModel, type TextFile } from './run-model';
 export { startRun } from './start-run';
 export { stopRun } from './stop-run';
 export { readTeamWords, type TeamWords } from './team-words';
+export { workOutWays } from './work-out-ways';

@@ -14,21 +14,21 @@ import type { RunSummary } from './views';
 const patienceMilliseconds = 10_000;
 
 /**
- * Stops a run and keeps its best roster. Answers when the roster is stored, or after ten seconds with
- * a run that is still stopping.
+ * Stops a run and keeps its best roster; once its roster is stored, the search for what stands in the
+ * floors' way. Answers when that has ended, or after ten seconds with a run that is still stopping.
  */
 export async function stopRun(actor: Actor, runId: RunId): Promise<Outcome<RunSummary>> {
   const found = requireRun(actor, 'rosters.write', runId);
   if (!found.ok) return found;
   const { run, team } = found.value;
-  if (run.state !== 'running') {
+  const active = findActiveRun(runId);
+  if (run.state !== 'running' && !active) {
     return refuse('conflict', `Run ${run.number} has ended already; there is nothing to stop.`);
   }
   inTransaction(() => {
     const detail = { rosterId: run.rosterId };
     recordAudit({ actor, teamId: team.id, action: 'run.stop', subjectId: runId, detail });
   });
-  const active = findActiveRun(runId);
   if (active) {
     active.stop.abort();
     await Promise.race([active.done, pause(patienceMilliseconds, undefined, { ref: false })]);

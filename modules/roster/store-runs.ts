@@ -3,6 +3,7 @@ import { db } from '../../db/client';
 import { rosters, runs, users } from '../../db/schema';
 import { type PlannedRoster, type Problem, readProblem } from '../problem';
 import { readProof } from '../proof';
+import type { KnotsAnswer } from '../solver';
 import type { RosterId, RunId, TeamId, UserId } from '../units';
 import type { Run, RunEnd } from './stored';
 
@@ -61,13 +62,14 @@ export function findRun(id: RunId): Run | null {
   return row ? toRun(row) : null;
 }
 
-/** The input of a run and the best roster found; throws for an unknown run. */
+/** The input of a run, the best roster found and the knots told; throws for an unknown run. */
 export function readRunDocuments(id: RunId): {
   readonly problem: Problem;
   readonly roster: PlannedRoster | null;
+  readonly knots: KnotsAnswer | null;
 } {
   const row = db()
-    .select({ problem: runs.problem, roster: runs.roster })
+    .select({ problem: runs.problem, roster: runs.roster, knots: runs.knots })
     .from(runs)
     .where(eq(runs.id, id))
     .get();
@@ -75,7 +77,7 @@ export function readRunDocuments(id: RunId): {
   // A run of last year holds the problem document of that time.
   const problem = readProblem(row.problem);
   if (!problem.ok) throw new Error(`The problem of run ${id}: ${problem.error.detail}`);
-  return { problem: problem.value, roster: row.roster };
+  return { problem: problem.value, roster: row.roster, knots: row.knots };
 }
 
 /** The runs of a team, newest first. */
@@ -101,6 +103,11 @@ export function listRunningRuns(): Run[] {
 /** Keeps the best roster so far, so that a crash loses little. */
 export function keepRunRoster(id: RunId, roster: PlannedRoster): void {
   db().update(runs).set({ roster }).where(eq(runs.id, id)).run();
+}
+
+/** Keeps why the floors cannot all be held. */
+export function keepRunKnots(id: RunId, knots: KnotsAnswer): void {
+  db().update(runs).set({ knots }).where(eq(runs.id, id)).run();
 }
 
 /** Ends a running run; false when it had ended already. */

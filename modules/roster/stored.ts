@@ -53,7 +53,7 @@ export interface VersionShift extends KeptShift {
   readonly isPublished: boolean;
 }
 
-/** A run without its two large documents, the problem and the roster. */
+/** A run without its large documents: the problem, the roster and the knots. */
 export interface Run {
   readonly id: RunId;
   readonly rosterId: RosterId;

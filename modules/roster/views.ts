@@ -9,6 +9,7 @@ import type {
   TeamId,
   VersionId,
 } from '../units';
+import type { KnotsView } from './knot-views';
 
 /** A line of the list of periods. */
 export interface RosterSummary {
@@ -191,6 +192,12 @@ export interface RunView extends RunSummary {
     readonly limit: string;
     readonly source: string;
   }[];
+  /** Why the floors cannot all be held; null when they can be, and when nobody looked. */
+  readonly knots: KnotsView | null;
+  /** The roster stands, and what stands in the way of the floors is being looked for. */
+  readonly isLookingForKnots: boolean;
+  /** Whether ways out can be worked out: against a roster, by somebody who may change it. */
+  readonly mayWorkOut: boolean;
   readonly mayStop: boolean;
 }
 

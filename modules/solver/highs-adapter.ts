@@ -9,6 +9,11 @@ const defaultAbsoluteGap = 1e-6;
 
 /** What HiGHS takes for no limit on a count. */
 const noLimit = 2_147_483_647;
+/** HiGHS takes no endless time limit. */
+const mostSeconds = 1e9;
+
+/** A time limit as HiGHS takes it. */
+export const timeLimit = (seconds: number): number => Math.min(mostSeconds, Math.max(0, seconds));
 
 /** Solves a linear model for one of its objectives in HiGHS. Blocks its thread until the end. */
 export function solveLinearModel(
@@ -25,7 +30,7 @@ export function solveLinearModel(
   return highs.withModel(toHighs(highs, model, objective), (instance) => {
     instance.options.set({
       output_flag: false,
-      time_limit: options.limitSeconds,
+      time_limit: timeLimit(options.limitSeconds),
       random_seed: options.seed ?? 0,
       mip_rel_gap: options.targetGap ?? 0,
       mip_abs_gap: absoluteGap,

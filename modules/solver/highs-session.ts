@@ -1,6 +1,6 @@
 import type { Highs, Model } from 'highs';
 import { type LinearModel, objectiveOf } from '../model';
-import { toHighs } from './highs-adapter';
+import { timeLimit, toHighs } from './highs-adapter';
 import type { LinearOutcome } from './linear-outcome';
 import type { LinearSession, NewColumns, SessionOptions } from './linear-session';
 import { worstBound } from './read-outcome';
@@ -59,7 +59,7 @@ function solve(
   const { callbackType, modelStatus } = highs.constants;
   instance.zeroAllClocks();
   instance.options.set({
-    time_limit: Math.max(0, limitSeconds),
+    time_limit: timeLimit(limitSeconds),
     simplex_iteration_limit: iterationLimit ?? 2_147_483_647,
     solver: method === 'interior' ? 'ipm' : 'simplex',
     run_crossover: 'off',

@@ -36,13 +36,15 @@ export interface LaneLink {
 }
 
 /** A job as it crosses to the thread. */
-export interface SolverTask {
-  readonly job: SolverJob;
+export interface ThreadTask<Job> {
+  readonly job: Job;
   /** Carries `SolverMessage`s out while the thread computes. */
   readonly port: MessagePort;
   /** One Int32: 0, or 1 to stop. A message could not reach a thread that computes. */
   readonly stopFlag: SharedArrayBuffer;
 }
+
+export type SolverTask = ThreadTask<SolverJob>;
 
 export type SolverMessage =
   | { readonly kind: 'started' }

@@ -3,6 +3,7 @@ import { createRequire } from 'node:module';
 import { dirname, join } from 'node:path';
 import { Piscina } from 'piscina';
 import { env } from '../../db/env';
+import { workerFile } from './worker-file';
 
 /** What every solver thread is given. */
 export interface SolverThreadData {
@@ -30,7 +31,7 @@ async function makePool(): Promise<Piscina> {
   const wasmModule = await WebAssembly.compile(await readFile(join(folder, 'highs.wasm')));
   const workerData: SolverThreadData = { wasmModule };
   return new Piscina({
-    filename: join(process.cwd(), 'dist', 'workers', 'solver.mjs'),
+    filename: workerFile('solver'),
     minThreads: 0,
     maxThreads: env().SOLVER_THREADS,
     idleTimeout: idleMilliseconds,

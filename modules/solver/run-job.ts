@@ -1,6 +1,7 @@
 import { MessageChannel, type MessagePort } from 'node:worker_threads';
-import type { SolverJob, SolverMessage, SolverTask } from './messages';
+import type { SolverJob, SolverMessage, ThreadTask } from './messages';
 import { solverPool } from './pool';
+import { workerFile } from './worker-file';
 
 /** A thread that does not answer a stop is ended after this; its best roster is already here. */
 const hardStopAfterMs = 2000;
@@ -22,13 +23,29 @@ export type JobEnd<T> =
   | { readonly kind: 'broken'; readonly cause: unknown };
 
 /** Runs a job in a solver thread. The event loop stays free; never rejects. */
-export async function runJob<T>(job: SolverJob, options: JobOptions): Promise<JobEnd<T>> {
+export const runJob = <T>(job: SolverJob, options: JobOptions): Promise<JobEnd<T>> =>
+  runInThread<T>('solver', job, options);
+
+/**
+ * Runs other heavy work in a solver thread, by the worker of that name: it is given a `ThreadTask`, posts
+ * `started` on its port and returns the answer. It is ended soon after a stop or its limit, which counts
+ * from its start. The event loop stays free; never rejects.
+ */
+export async function runInThread<T>(
+  worker: string,
+  job: unknown,
+  options: JobOptions,
+): Promise<JobEnd<T>> {
   const kill = new AbortController();
   const line = openLine(options, kill);
   try {
-    const task: SolverTask = { job, port: line.port, stopFlag: line.stopFlag };
+    const task: ThreadTask<unknown> = { job, port: line.port, stopFlag: line.stopFlag };
     const pool = await solverPool();
-    const given = { transferList: [line.port, ...(options.ports ?? [])], signal: kill.signal };
+    const given = {
+      filename: workerFile(worker),
+      transferList: [line.port, ...(options.ports ?? [])],
+      signal: kill.signal,
+    };
     return { kind: 'answered', answer: await pool.run(task, given) };
   } catch (cause) {
     const [fault] = line.faults;

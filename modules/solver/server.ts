@@ -12,6 +12,7 @@ export * from './analyse';
 export { loosened } from './knots/plan-ways';
 export { withAbsences } from './mend/with-absences';
 export { closeSolver } from './pool';
+export { runInThread } from './run-job';
 
 export interface SolveRosterOptions {
   readonly limitSeconds: number;

@@ -10,6 +10,7 @@ import * as events from '@/app/api/v1/runs/[runId]/events/route';
 import * as model from '@/app/api/v1/runs/[runId]/model/route';
 import * as run from '@/app/api/v1/runs/[runId]/route';
 import * as stop from '@/app/api/v1/runs/[runId]/stop/route';
+import * as waysOut from '@/app/api/v1/runs/[runId]/ways-out/route';
 import * as teamCalendar from '@/app/api/v1/teams/[teamId]/calendar/route';
 import * as footing from '@/app/api/v1/teams/[teamId]/footing/route';
 import * as hours from '@/app/api/v1/teams/[teamId]/hours/route';
@@ -88,6 +89,12 @@ test('a supervisor opens, runs, reads and publishes over the API', async () => {
   expect(file.headers.get('content-disposition')).toBe(
     'attachment; filename="roster-2027-02-01-run-1.lp"',
   );
+  const other = await call(model.GET, { params: { runId }, query: '?format=mps' });
+  expect(other.headers.get('content-disposition')).toBe(
+    'attachment; filename="roster-2027-02-01-run-1.mps"',
+  );
+  const unknown = await call(model.GET, { params: { runId }, query: '?format=xls' });
+  expect(unknown.status).toBe(400);
   const published = await call(publish.POST, { params: { rosterId }, body: {} });
   expect(published.status).toBe(200);
   expect(await published.json()).toMatchObject({ state: 'published', versionNumber: 1 });
@@ -142,6 +149,22 @@ test('a roster that is short answers 409 with one field error for each shortage'
   expect(document.fields[0].path).toBe('acceptShortage');
 });
 
+test('ways out of a knot are worked out over the API', async () => {
+  team = smallTeam(['Ada', 'Bo']);
+  session.actor = team.supervisor;
+  const { runId } = await openAndRun();
+  const answer = await call(waysOut.POST, { params: { runId }, body: { knot: 0 } });
+  expect(answer.status).toBe(200);
+  const [way] = await answer.json();
+  expect(way).toMatchObject({
+    changes: [{ words: expect.any(String), ask: expect.any(String) }],
+    effect: { costChangeCents: { least: expect.any(Number) } },
+  });
+  const missing = await call(waysOut.POST, { params: { runId }, body: { knot: 99 } });
+  expect(missing.status).toBe(404);
+  expect((await call(waysOut.POST, { params: { runId }, body: { knot: -1 } })).status).toBe(400);
+});
+
 test.each([
   ['no range', '', 'from'],
   ['a date that does not exist', '?from=2027-02-29&to=2027-03-01', 'from'],
@@ -182,6 +205,7 @@ test('strangers get 401, wrong roles 403, and ids that are not theirs 404', asyn
     [events.GET, { params: { runId } }],
     [model.GET, { params: { runId } }],
     [stop.POST, { params: { runId } }],
+    [waysOut.POST, { params: { runId }, body: { knot: 0 } }],
     [teamCalendar.GET, { params: ofTeam(), query: week }],
     [footing.GET, { params: ofTeam(), query: week }],
   ];

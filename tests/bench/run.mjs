@@ -1,16 +1,16 @@
 /*
- * Runs a command of the benchmark: `node tests/bench/run.mjs roster --file ...`. Bundles the solver's
- * worker and the commands, since Node does not read TypeScript, then calls `main` of the one asked for.
+ * Runs a command of the benchmark: `node tests/bench/run.mjs roster --file ...`. Bundles the
+ * workers and the commands, since Node does not read TypeScript, then calls `main` of the one asked for.
  */
 import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { build } from 'esbuild';
-import { buildWorker } from '../../modules/solver/build-worker.mjs';
+import { buildWorkers } from '../../app/build-workers.mjs';
 
 const folder = join('dist', 'bench');
 const [command, ...args] = process.argv.slice(2);
 
-await buildWorker();
+await buildWorkers();
 await build({
   entryPoints: ['roster', 'bench', 'solve-case'].map((name) =>
     join(import.meta.dirname, `${name}.ts`),

@@ -1,4 +1,4 @@
-import { buildWorker } from '@/modules/solver/build-worker.mjs';
+import { buildWorkers } from '@/app/build-workers.mjs';
 
-/** Solver threads run a bundled file: it is built once before all tests. */
-export default buildWorker;
+/** Worker threads run bundled files: they are built once before all tests. */
+export default buildWorkers;

@@ -27,7 +27,10 @@ export interface ColumnGenerationResult {
   /** The prices that prove the bound; null before a first round. */
   readonly prices: MasterPrices | null;
   readonly patterns: readonly Pattern[];
+  readonly part: Part;
   readonly master: PatternMaster;
+  /** By pattern: its value in the last master; none for those added after it, empty before a first. */
+  readonly values: Float64Array;
   /** Value of the last master with the rest of the roster as it is, in the terms of `RosterLines.total`. */
   readonly value: number;
   /** Duals of the last master, by its rows. */
@@ -41,7 +44,7 @@ const patternsARound = 4;
 /** Relative distance of master value and bound at which it has converged. */
 const convergence = 1e-6;
 /** Rows x people beyond which the first solve goes by the interior point method. */
-const wideMaster = 12_000;
+const wideMaster = 24_000;
 
 /**
  * The linear relaxation over whole-period patterns by column generation (Gilmore and Gomory, Operations
@@ -73,6 +76,8 @@ export function generateColumns(
   let round = 0;
   let rowDuals: Float64Array | null = null;
   let value = Number.NEGATIVE_INFINITY;
+  let values = new Float64Array(0);
+  const firstPattern = master.linear.columnNames.length;
   try {
     master.add(session, patterns);
     for (; round < plan.mostRounds && !plan.shouldStop() && !isConverged; round += 1) {
@@ -80,12 +85,15 @@ export function generateColumns(
       if (!solved) break;
       rowDuals = solved.rowDuals;
       value = solved.value + outside;
+      values = solved.values.slice(firstPattern);
       const prices = master.readPrices(solved.rowDuals);
       const priced = priceAll(space, refill, prices, plan.part);
-      const bound = lagrangianBound(space, prices, priced.least);
-      if (bound > best.bound) {
-        best = { bound, prices };
-        plan.onBound(bound, prices);
+      if (isWhole) {
+        const bound = lagrangianBound(space, prices, priced.least);
+        if (bound > best.bound) {
+          best = { bound, prices };
+          plan.onBound(bound, prices);
+        }
       }
       const added = priced.patterns.filter((pattern) => !seen.has(keyOf(pattern)));
       for (const pattern of added) seen.add(keyOf(pattern));
@@ -97,7 +105,17 @@ export function generateColumns(
   } finally {
     session.close();
   }
-  return { ...best, patterns, master, value, rowDuals, isConverged, rounds: round };
+  return {
+    ...best,
+    part: plan.part,
+    patterns,
+    master,
+    value,
+    values,
+    rowDuals,
+    isConverged,
+    rounds: round,
+  };
 }
 
 const keyOf = ({ person, cells }: Pattern): string => `${person}:${cells.join()}`;
@@ -107,7 +125,11 @@ function solveMaster(
   { limitSeconds, shouldStop, onIterations, part }: ColumnGenerationPlan,
   isFirst: boolean,
   { rows }: SearchSpace,
-): { readonly value: number; readonly rowDuals: Float64Array } | null {
+): {
+  readonly value: number;
+  readonly values: Float64Array;
+  readonly rowDuals: Float64Array;
+} | null {
   const isWide = rows.count * part.people.length > wideMaster;
   const method = isWide ? 'interior' : isFirst ? 'dual' : 'primal';
   const outcome = session.solve({
@@ -117,7 +139,8 @@ function solveMaster(
     ...(onIterations ? { onIterations } : {}),
   });
   if (outcome.kind !== 'optimal' || !outcome.duals) return null;
-  return { value: outcome.solution.objective, rowDuals: outcome.duals.rowDuals };
+  const { objective: value, values } = outcome.solution;
+  return { value, values, rowDuals: outcome.duals.rowDuals };
 }
 
 interface PricedAll {

@@ -185,7 +185,9 @@ function addCouplingRows(builder: ModelBuilder, roster: RosterLines, part: Part)
       const added = builder.addColumn({
         name: linear.columnNames[column] ?? '',
         lower: linear.columnLower[column] ?? 0,
-        upper: linear.columnUpper[column] ?? Number.POSITIVE_INFINITY,
+        upper: rows.isUnbounded[column]
+          ? Number.POSITIVE_INFINITY
+          : (linear.columnUpper[column] ?? Number.POSITIVE_INFINITY),
         costs: { cost: columns.cost[column] ?? 0 },
       });
       entries.push([added, linear.values[at] ?? 0]);

@@ -13,9 +13,15 @@ export interface RowCosts {
   readonly offsets: Int32Array;
   readonly least: Int32Array;
   readonly table: Float64Array;
+  /**
+   * 1 for the dearest elastic column of a row on either side. People never use more of it than its bound
+   * allows; relaxations leave the bound out, or it would earn a dual beyond what the row costs.
+   */
+  readonly isUnbounded: Uint8Array;
 }
 
 interface Step {
+  readonly column: number;
   readonly units: number;
   readonly price: number;
 }
@@ -32,6 +38,7 @@ export function readRowCosts(
   const offsets = new Int32Array(rows.length);
   const least = new Int32Array(rows.length);
   const table: number[] = [];
+  const isUnbounded = new Uint8Array(linear.columnNames.length);
   rows.forEach((row, position) => {
     const below: Step[] = [];
     const above: Step[] = [];
@@ -45,7 +52,12 @@ export function readRowCosts(
         continue;
       }
       const units = (linear.columnUpper[column] ?? 0) * Math.abs(value);
-      (value > 0 ? below : above).push({ units, price: (costs[column] ?? 0) / Math.abs(value) });
+      const price = (costs[column] ?? 0) / Math.abs(value);
+      (value > 0 ? below : above).push({ column, units, price });
+    }
+    for (const steps of [below, above]) {
+      const [dearest] = [...steps].sort((one, other) => other.price - one.price);
+      if (dearest) isUnbounded[dearest.column] = 1;
     }
     const cost = costOf(
       linear.rowLower[row] ?? Number.NEGATIVE_INFINITY,
@@ -64,6 +76,7 @@ export function readRowCosts(
     offsets,
     least,
     table: Float64Array.from(table),
+    isUnbounded,
   };
 }
 

@@ -51,7 +51,9 @@ export interface SpreadTerm {
 export function makeSearchSpace(model: RosterModel, objectiveName: string): SearchSpace {
   const { problem, linear } = model;
   const costs = objectiveOf(linear, objectiveName).costs;
-  const coupling = [...model.floors, ...model.ceilings, ...model.teamRows]
+  // Overtime in a budget is no elastic column: what it comes to depends on whole lines.
+  const teamRows = model.teamRows.filter(({ others }) => others.length === 0);
+  const coupling = [...model.floors, ...model.ceilings, ...teamRows]
     .map(({ row }) => row)
     .filter((row) => isNarrow(model, row));
   const lines = buildPersonLines(problem, model.works);

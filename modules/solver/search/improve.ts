@@ -4,6 +4,7 @@ import { generateColumns } from '../lines/column-generation';
 import type { LinePool } from '../lines/line-pool';
 import type { Part } from '../lines/part';
 import { type Choice, chooseDays, choosePeople, freeColumns } from './choose-part';
+import { dive } from './dive';
 import { type Ground, linesOf, putRoster } from './first-roster';
 import type { Pace } from './pace';
 import type { LinearTools } from './search-lane';
@@ -26,6 +27,10 @@ interface Arm {
 const longSolve = 1.5;
 const shortSolve = 0.6;
 const mostNodes = 400;
+/** More people are laid by a dive. */
+const mostPeopleOfATree = 12;
+/** Nominal seconds of the longest annealing. */
+const longestAnneal = 10;
 /** How much of an arm's past still counts after each step. */
 const memory = 0.92;
 
@@ -45,7 +50,7 @@ export interface Improver extends LinearTools {
 export class Improvement {
   readonly #tools: Improver;
   readonly #arms: Arm[] = [
-    { name: 'anneal', size: 1, spent: 0, successes: 0 },
+    { name: 'anneal', size: 2, spent: 0, successes: 1 },
     { name: 'people', size: 800, spent: 0, successes: 0 },
     { name: 'days', size: 800, spent: 0, successes: 0 },
     { name: 'part', size: 800, spent: 0, successes: 0 },
@@ -99,25 +104,28 @@ export class Improvement {
   }
 
   #anneal(arm: Arm): void {
-    const { ground, state, pace, random } = this.#tools;
+    const { ground, state, pace, random, pool } = this.#tools;
     if (!state.best || putRoster(ground, state.best.roster).length > 0) return;
     const startedAt = pace.elapsed();
     const arcs = ground.refill.work;
     let counted = arcs;
     const { hotCents, coldCents } = temperatures(ground);
+    const heat = random() < 0.5 ? 1 : 0.1 + 0.4 * random();
     anneal(ground.lines, ground.refill, {
       progress: () => {
         pace.countArcs(ground.refill.work - counted);
         counted = ground.refill.work;
         return state.isOver ? 1 : (pace.elapsed() - startedAt) / arm.size;
       },
-      hotCents: hotCents * (0.1 + 0.4 * random()),
+      hotCents: hotCents * heat,
       coldCents,
       random,
-      worth: null,
+      worth: state.worth,
       onBest: () => undefined,
     });
+    pool.take(ground.lines);
     state.offerLines(ground);
+    arm.size = Math.min(longestAnneal, arm.size * 1.3);
   }
 
   /** A part laid anew over whole patterns: column generation, then a search tree over what it found. */
@@ -146,6 +154,10 @@ export class Improvement {
       isEnough: () => false,
     });
     if (found.value >= ground.lines.total - 0.5) return;
+    if (!isWindow && part.people.length > mostPeopleOfATree) {
+      dive(this.#tools, found);
+      return;
+    }
     searchPatterns(
       {
         ...this.#tools,

@@ -20,6 +20,8 @@ export interface Pace {
 const arcsASecond = 60e6;
 /** Nonzeros x iterations of a linear solve in a nominal second. */
 const solverWorkASecond = 40e6;
+/** Every step counts for at least so many nominal seconds, or a search without people would never end. */
+const leastSeconds = 1e-4;
 
 /** The pace of the wall clock; `clock` gives milliseconds. */
 export function paceByClock(clock: () => number, limitSeconds: number): Pace {
@@ -42,10 +44,10 @@ export function paceByWork(budgetSeconds: number): Pace {
     elapsed: () => done,
     remaining: () => budgetSeconds - done,
     countArcs: (arcs) => {
-      done += arcs / arcsASecond;
+      done += Math.max(leastSeconds, arcs / arcsASecond);
     },
     countSolve: (nonzeros, iterations) => {
-      done += (nonzeros * Math.max(1, iterations)) / solverWorkASecond;
+      done += Math.max(leastSeconds, (nonzeros * iterations) / solverWorkASecond);
     },
   };
 }

@@ -3,6 +3,7 @@ import { generateColumns } from '../lines/column-generation';
 import type { LinePool } from '../lines/line-pool';
 import { wholeOf } from '../lines/part';
 import type { MasterPrices } from '../lines/pattern-master';
+import { dive } from './dive';
 import { linesOf, putRoster } from './first-roster';
 import { levelCents } from './level-cents';
 import { contradiction, keepLevels, type LevelProof } from './prove-levels';
@@ -13,6 +14,7 @@ import { searchPatterns } from './search-patterns';
 export interface CostProof extends LevelProof, LinearTools {
   readonly isAlone: boolean;
   readonly pool: LinePool;
+  readonly random: () => number;
   readonly prices: MasterPrices | null;
 }
 
@@ -22,15 +24,20 @@ const closeGap = 0.03;
 const mostColumns = 6000;
 const fewColumns = 1200;
 const columnShare = 0.35;
+const tryShare = 0.12;
 const patternShare = 0.15;
 const mostNodes = 100_000;
 const treeShare = { alone: 0.6, accompanied: 1 };
 
-/** Stage two, the bound: by whole-period patterns where the compact relaxation is far off. */
+/**
+ * Stage two, the bound: by whole-period patterns. Where the compact relaxation is close already they get a
+ * short try only: on loose problems with many overlapping floors they converge too slowly.
+ */
 export function boundCost(proof: CostProof): void {
   const { state, ground, prices } = proof;
   if (prices) raiseByPrices(ground, state, prices);
-  if (state.best && !state.isOver && !isClose(proof)) boundByPatterns(proof);
+  if (!state.best || state.isOver) return;
+  boundByPatterns(proof, prices && isClose(proof) ? tryShare : columnShare);
 }
 
 /**
@@ -52,11 +59,11 @@ export function isClose({ state, ground }: Pick<CostProof, 'state' | 'ground'>):
   return (solved.costCents - solved.boundCents) / changeable <= closeGap;
 }
 
-function boundByPatterns(proof: CostProof): void {
+function boundByPatterns(proof: CostProof, shareOfRest: number): void {
   const { ground, state, open, pace } = proof;
   if (!state.best || putRoster(ground, state.best.roster).length > 0) return;
   const startedAt = pace.elapsed();
-  const share = pace.remaining() * columnShare;
+  const share = pace.remaining() * shareOfRest;
   const found = generateColumns(ground.lines, ground.refill, open, {
     part: wholeOf(ground.space),
     patterns: [...linesOf(ground, wholeOf(ground.space)), ...proof.pool.patterns()],
@@ -79,6 +86,8 @@ function boundByPatterns(proof: CostProof): void {
   });
   if (found.prices) state.shareWorth(found.prices.rows);
   proof.pool.add(found.patterns);
+  if (state.isOver || !found.isConverged) return;
+  dive(proof, found);
   if (state.isOver) return;
   putRoster(ground, state.best.roster);
   const limitSeconds = pace.remaining() * patternShare;

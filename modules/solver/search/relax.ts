@@ -1,9 +1,10 @@
-import { blendObjective, type RosterModel, relaxed } from '../../model';
+import { blendObjective, type LinearModel, type RosterModel, relaxed } from '../../model';
 import type { LinearSolver } from '../linear-solver';
 import { writeBoundRecord } from '../lines/bound-record';
 import { pricingBy } from '../lines/column-generation';
 import { lagrangianBound } from '../lines/lagrangian-bound';
 import type { MasterPrices } from '../lines/pattern-master';
+import type { SearchSpace } from '../lines/search-space';
 import type { Ground } from './first-roster';
 import { levelCents } from './level-cents';
 import type { Pace } from './pace';
@@ -28,7 +29,7 @@ export function relaxCompact(
 ): MasterPrices | null {
   const { linear } = ground.model;
   if (linear.columnNames.length > mostColumns) return null;
-  const outcome = solve(relaxed(linear), blendObjective, {
+  const outcome = solve(unbounded(relaxed(linear), ground.space), blendObjective, {
     limitSeconds: pace.isCounted
       ? Number.POSITIVE_INFINITY
       : Math.min(mostSeconds, pace.remaining() * mostShare),
@@ -42,6 +43,13 @@ export function relaxCompact(
   raiseByPrices(ground, state, prices);
   return prices;
 }
+
+const unbounded = (linear: LinearModel, { rows }: SearchSpace): LinearModel => ({
+  ...linear,
+  columnUpper: linear.columnUpper.map((upper, column) =>
+    rows.isUnbounded[column] ? Number.POSITIVE_INFINITY : upper,
+  ),
+});
 
 /** Raises the bound of the cost by the Lagrangian bound of some prices. */
 export function raiseByPrices(ground: Ground, state: SearchState, prices: MasterPrices): void {

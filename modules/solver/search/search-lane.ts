@@ -220,6 +220,7 @@ function improve(search: Search, until = Number.POSITIVE_INFINITY): void {
   const improvement = new Improvement(search);
   while (!state.isOver && pace.elapsed() < until) {
     improvement.step();
+    pace.countArcs(0);
     state.fetchFromPeer();
   }
 }

@@ -21,13 +21,17 @@ const mostPatterns = 4000;
 /**
  * The best roster made of the generated patterns, by a search tree over the master that starts from the
  * roster in the ground's lines. A pattern whose reduced cost is above the gap between that roster and the
- * master's value is in no better roster and is left out.
+ * master's value (`gapCents`) is in no better roster and is left out.
  */
-export function searchPatterns(search: PatternSearch, found: ColumnGenerationResult): void {
+export function searchPatterns(
+  search: PatternSearch,
+  found: ColumnGenerationResult,
+  gapCents = search.ground.lines.total - found.value,
+): void {
   const { ground, state, solve, pace, seed, limitSeconds, nodeLimit } = search;
   const duals = found.rowDuals;
   if (!duals) return;
-  const patterns = usefulPatterns(ground, found, duals);
+  const patterns = usefulPatterns(ground, found, duals, gapCents);
   const linear = found.master.withPatterns(patterns);
   const first = found.master.linear.columnNames.length;
   const outcome = solve(linear, 'cost', {
@@ -51,8 +55,9 @@ export function searchPatterns(search: PatternSearch, found: ColumnGenerationRes
 /** Patterns in the roster, then the others by their reduced cost. */
 function usefulPatterns(
   ground: Ground,
-  { patterns, master, value }: ColumnGenerationResult,
+  { patterns, master }: ColumnGenerationResult,
   duals: Float64Array,
+  gapCents: number,
 ): Pattern[] {
   const ranked = patterns.map((pattern) => ({
     pattern,
@@ -60,9 +65,8 @@ function usefulPatterns(
       ? Number.NEGATIVE_INFINITY
       : master.reducedCost(pattern, duals),
   }));
-  const gap = ground.lines.total - value;
   return ranked
-    .filter(({ reduced }) => reduced <= Math.max(1, gap))
+    .filter(({ reduced }) => reduced <= Math.max(1, gapCents))
     .sort((one, other) => one.reduced - other.reduced)
     .slice(0, mostPatterns)
     .map(({ pattern }) => pattern);

@@ -40,6 +40,11 @@ test('no amount of money is left in a proof for those who may not see pay', () =
   expect([proof.teamRuleUnits > 0, hidden.teamRuleUnits]).toEqual([true, 0]);
 });
 
+test('what became of the bound is pay, and is left out as a whole', () => {
+  const bound = { recheckedCents: 1, solverCents: 2, sentence: 'No roster can cost less.' };
+  expect(withoutPay({ ...proof, bound })).not.toHaveProperty('bound');
+});
+
 test('sentences that tell of pay leave it out, others stay', () => {
   expect(withoutPay(proof).breaches.map(({ sentence }) => sentence)).toEqual([
     'Ione Baptisto: 2 days in a row, Mon 1 Feb to Tue 2 Feb; the most is 1.',

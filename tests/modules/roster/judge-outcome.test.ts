@@ -25,6 +25,7 @@ function solved(problem: Problem, claims: Partial<SolvedRoster> = {}): SolvedRos
     gap: 0,
     levels: [480, 480],
     boundRecord: null,
+    recordedBoundCents: null,
     ...claims,
   };
 }

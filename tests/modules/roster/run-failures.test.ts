@@ -2,8 +2,6 @@ import { eq } from 'drizzle-orm';
 import { beforeEach, expect, test, vi } from 'vitest';
 import { db } from '@/db/client';
 import { assignments, runs } from '@/db/schema';
-import type { PlannedRoster, Problem } from '@/modules/problem';
-import { proveRoster } from '@/modules/proof';
 import {
   publishRoster,
   readBoard,
@@ -13,7 +11,7 @@ import {
   stopRun,
   waitForRun,
 } from '@/modules/roster/server';
-import type { RosterOutcome, SolvedRoster } from '@/modules/solver';
+import type { RosterOutcome } from '@/modules/solver';
 import type { RosterId, RunId } from '@/modules/units';
 import {
   codeOf,
@@ -23,15 +21,11 @@ import {
   shiftMinutes,
   smallTeam,
 } from '@/tests/support/small-team';
+import { onlyMonday, optimal, solved, solver } from '@/tests/support/stand-in-solver';
 
-/** What stands in for the solver in this file: its answers are what is under test here. */
-type Solve = (
-  problem: Problem,
-  options: { stop: AbortSignal; onRoster: (roster: PlannedRoster) => void },
-) => Promise<RosterOutcome>;
-const solver = vi.hoisted(() => ({ solve: (() => Promise.reject()) as Solve }));
-vi.mock('@/modules/solver/server', () => ({
-  solveRoster: (...call: Parameters<Solve>) => solver.solve(...call),
+vi.mock('@/modules/solver/server', async (original) => ({
+  ...(await original<typeof import('@/modules/solver/server')>()),
+  ...(await import('@/tests/support/stand-in-solver')).standIns,
 }));
 vi.mock('@/db/clock', () => ({ now: () => Date.parse('2027-01-14T09:00:00Z') }));
 
@@ -41,40 +35,8 @@ beforeEach(async () => {
   team = smallTeam();
   rosterId = openSmallPeriod(team);
   solver.solve = async (problem) => optimal(problem, onlyMonday(problem));
+  solver.knots = async () => ({ kind: 'ended', wasStopped: false });
   await run();
-});
-
-/** Ada takes the Early of Monday and nobody anything else: lawful, and 13 shifts short. */
-const onlyMonday = (problem: Problem, nurse = 0): PlannedRoster => [
-  {
-    personId: problem.people[nurse]?.id ?? '',
-    shiftIndex: 0,
-    postSkillId: problem.skills[0]?.id ?? '',
-  },
-];
-
-function solved(
-  problem: Problem,
-  roster: PlannedRoster,
-  claims: Partial<SolvedRoster> = {},
-): SolvedRoster {
-  const { shortageMinutes, shortageByPriority, costCents } = proveRoster(problem, roster);
-  return {
-    roster,
-    shortageMinutes,
-    shortageBoundMinutes: shortageMinutes,
-    costCents,
-    boundCents: costCents,
-    gap: 0,
-    levels: shortageByPriority.map(({ minutes }) => minutes),
-    boundRecord: null,
-    ...claims,
-  };
-}
-
-const optimal = (...found: Parameters<typeof solved>): RosterOutcome => ({
-  kind: 'optimal',
-  ...solved(...found),
 });
 
 async function run(): Promise<RunId> {

@@ -72,7 +72,13 @@ test('a run fills the draft with a proven cheapest roster', async () => {
   expect(board.cells).toHaveLength(14);
   expect(board.version).toMatchObject({ number: 1, publishedAtUtc: null });
   expect(board.run?.id).toBe(view.id);
-  expect(board.proof).toEqual(view.proof);
+  expect(view.proof?.bound).toMatchObject({
+    solverCents: view.boundCents,
+    sentence: expect.stringMatching(/^No roster can cost less than €2,36\d\.\d\d: reckoned anew/),
+  });
+  expect(view).toMatchObject({ knots: null, isLookingForKnots: false });
+  // The board re-checks the draft against today's data, of which no run knows a bound.
+  expect({ ...board.proof, bound: view.proof?.bound }).toEqual(view.proof);
   expect(board.activeRunId).toBeNull();
   expect(board.people.reduce((sum, person) => sum + person.plannedMinutes, 0)).toBe(
     14 * shiftMinutes,
@@ -194,14 +200,18 @@ test('a changed floor shows on the draft at once', async () => {
   expect(lanes[0]?.slots.find(({ need }) => need === 2)).toMatchObject({ startMinute: 420 });
 });
 
-test('the model of stage two is text of the LP format that holds the shortage found', async () => {
+test('the model of stage two is text of the LP or MPS format that holds the shortage found', async () => {
   team = smallTeam(['Ada', 'Bo']);
   const { id } = await run(openSmallPeriod(team));
-  const file = mustBeOk(readRunModel(team.supervisor, id));
+  const file = mustBeOk(readRunModel(team.supervisor, id, 'lp'));
   expect(file.fileName).toBe('roster-2027-02-01-run-1.lp');
   expect(file.text).toContain('Minimize');
   expect(file.text.replaceAll(/\s+/g, ' ')).toMatch(/shortage1: .*? <= 1920 /);
   expect(file.text.trimEnd().endsWith('End')).toBe(true);
+  const other = mustBeOk(readRunModel(team.supervisor, id, 'mps'));
+  expect(other.fileName).toBe('roster-2027-02-01-run-1.mps');
+  expect(other.text).toMatch(/^ RHS shortage1 1920$/m);
+  expect(other.text.trimEnd().endsWith('ENDATA')).toBe(true);
 });
 
 test('a follower is told what it missed, what comes, and the end, each once', async () => {
@@ -251,7 +261,7 @@ test('every look at a run and every change is refused to other roles and teams',
   ] as const) {
     expect(codeOf(startRun(actor, rosterId, {}))).toBe(code);
     expect(codeOf(readRun(actor, id))).toBe(code);
-    expect(codeOf(readRunModel(actor, id))).toBe(code);
+    expect(codeOf(readRunModel(actor, id, 'lp'))).toBe(code);
     expect(codeOf(followRun(actor, id, 0, follower))).toBe(code);
     expect(codeOf(await stopRun(actor, id))).toBe(code);
     expect(codeOf(listRuns(actor, team.teamId))).toBe(code);

@@ -20,6 +20,7 @@ export function ProofList({ run }: { readonly run: RunView }) {
           </div>
         ))}
       </dl>
+      {run.proof?.bound ? <p className="pt-3">{run.proof.bound.sentence}</p> : null}
       {run.proof ? <Checked run={run} /> : null}
       <div className="pt-4">
         <Caution>

@@ -4,7 +4,9 @@ import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { callApi } from '@/app/_api';
 import { Button, ButtonLink, buttonClass } from '@/app/_ui/button';
 import { ProblemNote } from '@/app/_ui/problem-note';
-import type { RunSummary, RunView } from '@/modules/roster';
+import type { ModelFormat, RunSummary, RunView } from '@/modules/roster';
+
+const modelFormats: readonly ModelFormat[] = ['lp', 'mps'];
 
 /** Stop and keep the best while it runs; afterwards to the board. The model is there for other solvers. */
 export function RunActions({ run }: { readonly run: RunView }) {
@@ -15,16 +17,23 @@ export function RunActions({ run }: { readonly run: RunView }) {
   });
   return (
     <div className="flex flex-wrap items-center justify-end gap-2">
-      <a className={buttonClass('outline')} href={`/api/v1/runs/${run.id}/model`} download>
-        Model as LP file
-      </a>
+      {modelFormats.map((format) => (
+        <a
+          key={format}
+          className={buttonClass('outline')}
+          href={`/api/v1/runs/${run.id}/model?format=${format}`}
+          download
+        >
+          Model as {format.toUpperCase()} file
+        </a>
+      ))}
       {run.mayStop ? (
         <Button
-          look="primary"
+          look={run.state === 'running' ? 'primary' : 'outline'}
           disabled={stopping.isPending || stopping.isSuccess}
           onClick={() => stopping.mutate()}
         >
-          {stopping.isPending || stopping.isSuccess ? 'Stopping…' : 'Stop and keep best'}
+          {stopping.isPending || stopping.isSuccess ? 'Stopping…' : stopWords(run)}
         </Button>
       ) : null}
       {run.state === 'running' ? null : (
@@ -36,3 +45,7 @@ export function RunActions({ run }: { readonly run: RunView }) {
     </div>
   );
 }
+
+/** Once its roster stands, a run may still be looking for what stands in the way. */
+const stopWords = ({ state }: RunView): string =>
+  state === 'running' ? 'Stop and keep best' : 'Stop looking';

@@ -6,6 +6,7 @@ import { Verdict } from '@/app/_ui/verdict';
 import type { Board, RunView } from '@/modules/roster';
 import { runLead, runStateWords, runVerdict } from '../run-words';
 import { BestRoster } from './best-roster';
+import { Knots } from './knots';
 import { RunActions } from './run-actions';
 import { StageOne } from './stage-one';
 import { StageTwo } from './stage-two';
@@ -30,6 +31,7 @@ export function RunSheet({ start, frame }: Props) {
       <div className="grid gap-9 desk:grid-cols-[minmax(0,2fr)_minmax(0,1fr)]">
         <div className="grid content-start gap-6">
           <StageOne run={run} />
+          <Knots run={run} />
           <StageTwo run={run} />
         </div>
         <BestRoster run={run} frame={frame} />

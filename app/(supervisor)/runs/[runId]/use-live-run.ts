@@ -23,12 +23,12 @@ export function useLiveRun(start: RunView): RunView {
     queryFn: () => callApi<RunView>('GET', `runs/${start.id}`),
     initialData: start,
     refetchInterval: (query) =>
-      query.state.data?.state === 'running' ? rereadMilliseconds : false,
+      query.state.data && isLive(query.state.data) ? rereadMilliseconds : false,
   });
-  const isRunning = run.state === 'running';
-  // biome-ignore lint/correctness/useExhaustiveDependencies: one stream for the life of a running run
+  const isGoingOn = isLive(run);
+  // biome-ignore lint/correctness/useExhaustiveDependencies: one stream for the life of a run that goes on
   useEffect(() => {
-    if (!isRunning) return;
+    if (!isGoingOn) return;
     const stream = new EventSource(`/api/v1/runs/${start.id}/events`);
     stream.onmessage = ({ data }) => {
       const event: RunEvent = JSON.parse(data);
@@ -43,9 +43,13 @@ export function useLiveRun(start: RunView): RunView {
       announce('The run has ended.');
     });
     return () => stream.close();
-  }, [isRunning]);
+  }, [isGoingOn]);
   return run;
 }
+
+/** While it computes a roster, and then while it looks for what stands in the way. */
+const isLive = ({ state, isLookingForKnots }: RunView): boolean =>
+  state === 'running' || isLookingForKnots;
 
 function withEvent(run: RunView, event: RunEvent): RunView {
   if (run.events.some(({ sequence }) => sequence === event.sequence)) return run;

@@ -37,11 +37,17 @@ export const withoutWideRows = (problem: Problem): Problem => ({
   fairness: problem.fairness.filter(({ measure }) => measure !== 'refusedWishes'),
 });
 
-/** A ground on which everybody's line is laid; null when somebody has no lawful line or none is found. */
-export function layGround(problem: Problem, seed: number): Ground | null {
+/**
+ * A ground on which everybody's line is laid; null when somebody has no lawful line or none is found. A poor
+ * one is laid with a view to cover that nobody asked for.
+ */
+export function layGround(problem: Problem, seed: number, isPoor = false): Ground | null {
   const ground = prepareGround(problem);
   if (findClashes(ground).length > 0) return null;
-  const left = layAll(ground.lines, ground.refill, { random: seededRandom(seed), worth: null });
+  const random = seededRandom(seed);
+  const { count } = ground.space.rows;
+  const worth = isPoor ? Float64Array.from({ length: count }, () => (random() - 0.5) * 1e12) : null;
+  const left = layAll(ground.lines, ground.refill, { random, worth });
   return left.length === 0 ? ground : null;
 }
 

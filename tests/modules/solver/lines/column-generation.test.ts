@@ -135,6 +135,41 @@ describe('column generation', () => {
     expect(compared).toBeGreaterThan(4);
   });
 
+  it('lays a part of the roster at the least cost with the rest as it is', () => {
+    let changed = 0;
+    fc.assert(
+      fc.property(tinyProblem, anySeed, fc.nat(3), fc.nat(3), (problem, seed, one, other) => {
+        const ground = layGround(problem, seed, true);
+        if (!ground) return;
+        const [from, to] = [Math.min(one, other), Math.max(one, other) + 1];
+        const people = seed % 3 === 0 ? [seed % 2] : [0, 1];
+        const part = { people, from, to };
+        const found = generate(ground, { part, patterns: linesOf(ground, part) });
+        const { lines } = ground;
+        const isKept = ({ person, cells }: Pattern) =>
+          cells.every(
+            (column, day) =>
+              (day >= from && day < to) || column === lines.cells[person * lines.days + day],
+          );
+        expect(found.patterns.filter((pattern) => !isKept(pattern))).toEqual([]);
+        const master = new PatternMaster(lines, part);
+        const open = everyPattern(ground).filter(
+          (pattern) => people.includes(pattern.person) && isKept(pattern),
+        );
+        const fixed = lines.total - master.valueOf(lines);
+        const least = optimum(relaxed(master.withPatterns(open)), 'cost') + fixed;
+        const room = Math.max(1e-3, Math.abs(lines.total) * 1e-7);
+        expect(least).toBeLessThanOrEqual(lines.total + room);
+        changed += least < lines.total - room ? 1 : 0;
+        expect(found.value).toBeGreaterThanOrEqual(least - room);
+        if (ground.space.lines.some(({ sideLimits }) => sideLimits.length > 0)) return;
+        expect(found.value).toBeLessThanOrEqual(least + room);
+      }),
+      { numRuns: 50 },
+    );
+    expect(changed).toBeGreaterThan(3);
+  });
+
   it('gives bounds that rise, that no roster lies below and that the proof reckons too', () => {
     let compared = 0;
     fc.assert(

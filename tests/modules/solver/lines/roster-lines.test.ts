@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { proveRoster } from '@/modules/proof';
 import type { Ground } from '@/modules/solver/search/first-roster';
+import { buildProblem, houseKinds } from '@/tests/support/problem-builder';
 import {
   annealFor,
   anyProblem,
@@ -53,6 +54,26 @@ describe('lines that are annealed', () => {
     );
     expect(laid).toBeGreaterThan(20);
     expect(bests).toBeGreaterThan(laid);
+  });
+
+  it('leave a budget to the model where overtime is paid out of it', () => {
+    // Contract pay of 40.00 an hour: overtime is one whole coin a minute, and no shift has a price.
+    const problem = buildProblem({
+      kinds: houseKinds.slice(0, 1),
+      people: [{ payCentsPerHour: 4000, contractMinutes: 960 }],
+      pay: { overtimeSteps: [{ overMinutes: 0, percent: 150 }] },
+      floors: [0, 1, 2, 3].map((day) => ({
+        startMinute: day * 1440 + 420,
+        endMinute: day * 1440 + 900,
+      })),
+      teamRules: [{ id: 'b', name: 'Budget', kind: 'budget', priceCents: 1, mostCents: 70_000 }],
+    });
+    const ground = layGround(problem, 1);
+    if (!ground) throw new Error('nobody is laid');
+    compareFigures(ground);
+    annealFor(ground, 2, 1);
+    compareFigures(ground);
+    expect(proveRoster(problem, rosterOf(ground)).overtimeMinutes).toBeGreaterThan(0);
   });
 
   it('break no rule of any person, whatever the moves', () => {
