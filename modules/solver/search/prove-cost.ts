@@ -2,53 +2,28 @@ import { writeBoundRecord } from '../lines/bound-record';
 import { generateColumns } from '../lines/column-generation';
 import type { LinePool } from '../lines/line-pool';
 import { wholeOf } from '../lines/part';
-import type { MasterPrices } from '../lines/pattern-master';
 import { dive } from './dive';
-import { linesOf, putRoster } from './first-roster';
+import { type Ground, linesOf, putRoster } from './first-roster';
 import { levelCents } from './level-cents';
 import { contradiction, keepLevels, type LevelProof } from './prove-levels';
-import { raiseByPrices } from './relax';
 import type { LinearTools } from './search-lane';
 import { searchPatterns } from './search-patterns';
 
 export interface CostProof extends LevelProof, LinearTools {
-  readonly isAlone: boolean;
   readonly pool: LinePool;
   readonly random: () => number;
-  readonly prices: MasterPrices | null;
 }
 
 /** A compact relaxation this close leaves little to gain for column generation. */
 const closeGap = 0.03;
-/** Compact models up to this many columns go to the solver as a whole, the small ones in any case. */
-const mostColumns = 6000;
+/** Compact models up to this many columns are small enough for a search tree in any case. */
 const fewColumns = 1200;
-const columnShare = 0.35;
-const tryShare = 0.12;
 const patternShare = 0.15;
 const mostNodes = 100_000;
-const treeShare = { alone: 0.6, accompanied: 1 };
 
-/**
- * Stage two, the bound: by whole-period patterns. Where the compact relaxation is close already they get a
- * short try only: on loose problems with many overlapping floors they converge too slowly.
- */
-export function boundCost(proof: CostProof): void {
-  const { state, ground, prices } = proof;
-  if (prices) raiseByPrices(ground, state, prices);
-  if (!state.best || state.isOver) return;
-  boundByPatterns(proof, prices && isClose(proof) ? tryShare : columnShare);
-}
-
-/**
- * Stage two, the search: a search tree over the compact model where that is small or its relaxation close.
- * Answers a sentence when the solver breaks.
- */
-export function searchCost(proof: CostProof): string | null {
-  const columns = proof.ground.model.linear.columnNames.length;
-  const most = proof.prices && isClose(proof) ? mostColumns : fewColumns;
-  return columns <= most ? searchTree(proof) : null;
-}
+/** Whether a search tree may solve the compact model although its relaxation is weak. */
+export const isSmall = ({ model }: Ground): boolean =>
+  model.linear.columnNames.length <= fewColumns;
 
 /** Whether the bound is so near the best roster that column generation has little to gain. */
 export function isClose({ state, ground }: Pick<CostProof, 'state' | 'ground'>): boolean {
@@ -59,7 +34,11 @@ export function isClose({ state, ground }: Pick<CostProof, 'state' | 'ground'>):
   return (solved.costCents - solved.boundCents) / changeable <= closeGap;
 }
 
-function boundByPatterns(proof: CostProof, shareOfRest: number): void {
+/**
+ * The relaxation over whole-period patterns: its bound, a dive into it and, where it converged, a search
+ * tree over the patterns that a better roster can be made of.
+ */
+export function boundByPatterns(proof: CostProof, shareOfRest: number): void {
   const { ground, state, open, pace } = proof;
   if (!state.best || putRoster(ground, state.best.roster).length > 0) return;
   const startedAt = pace.elapsed();
@@ -94,11 +73,14 @@ function boundByPatterns(proof: CostProof, shareOfRest: number): void {
   searchPatterns({ ...proof, limitSeconds, nodeLimit: pace.isCounted ? 200 : mostNodes }, found);
 }
 
-function searchTree(proof: CostProof): string | null {
-  const { state, solve, pace, seed, isAlone } = proof;
+/**
+ * A search tree over the whole compact model, with the levels kept at those of the best roster. Answers a
+ * sentence when the solver breaks.
+ */
+export function searchTree(proof: CostProof, share: number): string | null {
+  const { state, solve, pace, seed } = proof;
   const best = state.best;
   if (!best) return null;
-  const share = isAlone ? treeShare.alone : treeShare.accompanied;
   const linear = keepLevels(proof, best.levels);
   const outcome = solve(linear, 'cost', {
     limitSeconds: pace.isCounted ? Number.POSITIVE_INFINITY : pace.remaining() * share,

@@ -79,8 +79,10 @@ function searchLevel(proof: LevelProof, linear: LinearModel, level: number): str
     },
     onIterations: (count) => pace.countSolve(linear.indices.length / 50, count),
   });
-  if ('bound' in outcome) state.raiseLevelBound(level, outcome.bound);
   if ('solution' in outcome && outcome.solution) state.offer(outcome.solution.values);
+  if ('bound' in outcome) {
+    state.raiseLevelBound(level, outcome.bound, outcome.kind === 'optimal');
+  }
   return contradiction(outcome);
 }
 

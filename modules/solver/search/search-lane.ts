@@ -11,9 +11,9 @@ import { Improvement } from './improve';
 import { layByModel } from './lay-by-model';
 import { type Pace, paceByClock, paceByWork } from './pace';
 import type { PeerLink } from './peer-link';
-import { boundCost, isClose, searchCost } from './prove-cost';
+import { boundByPatterns, isClose, isSmall, searchTree } from './prove-cost';
 import { proveLevels } from './prove-levels';
-import { relaxCompact } from './relax';
+import { raiseByPrices, relaxCompact } from './relax';
 import { type SearchHooks, SearchState } from './search-state';
 import { temperatures } from './temperatures';
 
@@ -59,8 +59,10 @@ const firstAnneal = 0.35;
 /** Share of what is left, and nominal seconds at most, of the guided annealing. */
 const shortAnneal = { share: 0.08, most: 2 };
 const longAnneal = { share: 0.25, most: 12 };
-/** Alone: share of what is left for improvement before the search tree. */
-const improveShare = 0.4;
+/** Shares of what is left: for column generation, for a short try of it, for a search tree. */
+const columnShare = 0.35;
+const tryShare = 0.15;
+const treeShare = { alone: 0.35, accompanied: 0.6 };
 
 /** One lane of a search; blocks its thread until the end. */
 export function searchLane(
@@ -123,7 +125,7 @@ function runLane(search: Search): Failure | null {
   if (lane.number === 0) {
     const sentence = prove(search);
     if (sentence) return { kind: 'failed', message: sentence };
-  } else annealGuided(search);
+  } else assist(search);
   improve(search);
   state.fetchFromPeer();
   return null;
@@ -150,8 +152,8 @@ function findFirst(search: Search): Failure | null {
 }
 
 /**
- * Relaxation, least levels, least cost; alone, with annealing and improvement in between, since nobody else
- * finds better rosters meanwhile. A sentence when the solver breaks.
+ * Lane 0: relaxation, least levels, least cost. Where the relaxation is close, a search tree over the
+ * compact model comes first, elsewhere whole-period patterns. A sentence when the solver breaks.
  */
 function prove(search: Search): string | null {
   const { ground, state, pace, lane, solve, options } = search;
@@ -161,10 +163,24 @@ function prove(search: Search): string | null {
   if (lane.isAlone || state.best?.levels.some((value) => value > 0)) annealGuided(search);
   const failure = proveLevels({ ground, state, solve, pace, seed: options.seed });
   if (failure || state.isOver) return failure;
-  const proof = { ...search, seed: options.seed, isAlone: lane.isAlone, prices };
-  boundCost(proof);
-  if (lane.isAlone) improve(search, pace.elapsed() + pace.remaining() * improveShare);
-  return state.isOver ? null : searchCost(proof);
+  if (prices) raiseByPrices(ground, state, prices);
+  const proof = { ...search, seed: options.seed };
+  if (prices && isClose(proof)) {
+    const broken = searchTree(proof, lane.isAlone ? treeShare.alone : treeShare.accompanied);
+    if (!broken && !state.isOver) boundByPatterns(proof, columnShare);
+    return broken;
+  }
+  boundByPatterns(proof, columnShare);
+  return state.isOver || !isSmall(ground) ? null : searchTree(proof, treeShare.alone);
+}
+
+/** Lane 1: while lane 0 is busy with a search tree, patterns may settle what the tree does not. */
+function assist(search: Search): void {
+  annealGuided(search);
+  const { state, options } = search;
+  if (!state.isOver && isClose(search)) {
+    boundByPatterns({ ...search, seed: options.seed }, tryShare);
+  }
 }
 
 /** Where the relaxation is close to the best roster, small parts solved exactly gain more than annealing. */
@@ -214,11 +230,11 @@ const showEvery = 0.25;
 /** Batches of moves between two looks at the lines for the pool. */
 const batchesAPool = 10;
 
-/** Fix and optimise until a nominal second, or the end. */
-function improve(search: Search, until = Number.POSITIVE_INFINITY): void {
+/** Fix and optimise until the end. */
+function improve(search: Search): void {
   const { state, pace } = search;
   const improvement = new Improvement(search);
-  while (!state.isOver && pace.elapsed() < until) {
+  while (!state.isOver) {
     improvement.step();
     pace.countArcs(0);
     state.fetchFromPeer();

@@ -176,13 +176,20 @@ export class SearchState {
     this.#peer.tell({ kind: 'worth', worth });
   }
 
-  raiseLevelBound(level: number, value: number): void {
+  /**
+   * `isLeast`: the model has nothing below `value`. The best roster is then the least one but for the
+   * rounding of pay that a firm budget is held against.
+   */
+  raiseLevelBound(level: number, value: number, isLeast = false): void {
     const step = this.#ground.model.levels[level]?.step ?? 1;
-    const trusted =
-      value - this.levelSlack(level) - levelTolerance - Math.abs(value) * relativeTolerance;
+    const slack = this.levelSlack(level);
+    const trusted = value - slack - levelTolerance - Math.abs(value) * relativeTolerance;
     const whole = Math.ceil(trusted / step) * step;
-    if (this.#raiseLevel(level, whole)) {
-      this.#peer.tell({ kind: 'level-bound', level, value: whole });
+    const reached = this.#best?.levels[level] ?? Number.POSITIVE_INFINITY;
+    const isRounding = isLeast && reached - whole <= Math.ceil(2 * slack);
+    const bound = isRounding ? Math.max(whole, reached) : whole;
+    if (this.#raiseLevel(level, bound)) {
+      this.#peer.tell({ kind: 'level-bound', level, value: bound });
     }
   }
 

@@ -20,6 +20,9 @@ const best: SolvedRoster = {
   costCents: 100,
   boundCents: 80,
   gap: 0.2,
+  levels: [480],
+  boundRecord: null,
+  recordedBoundCents: null,
 };
 
 /** A pool whose thread sends some messages and then computes until it is killed. */
@@ -33,7 +36,7 @@ function deafThread(
       for (const message of messages) post(task.port, message);
       onRun(task);
     });
-  vi.mocked(solverPool).mockReturnValue({ run } as never);
+  vi.mocked(solverPool).mockResolvedValue({ run } as never);
 }
 
 const post = (port: MessagePort, message: SolverMessage) => port.postMessage(message);
@@ -56,6 +59,7 @@ describe('a thread that does not answer a stop', () => {
     const rosters: unknown[] = [];
     const outcome = solveRoster(demoSizedProblem(), {
       limitSeconds: 60,
+      lanes: 1,
       stop: stop.signal,
       onRoster: (roster) => rosters.push(roster),
     });
@@ -75,7 +79,7 @@ describe('a thread that does not answer a stop', () => {
     const [plain] = plainModels;
     if (!plain) throw new Error('no model');
     const outcomes = Promise.all([
-      solveRoster(demoSizedProblem(), given),
+      solveRoster(demoSizedProblem(), { ...given, lanes: 1 }),
       solveSizing(
         { version: 1, cycleMinutes: 1440, objective: 'people', floors: [], patterns: [], caps: [] },
         given,
@@ -94,7 +98,7 @@ describe('a thread that does not answer a stop', () => {
 describe('a thread that overruns its time', () => {
   it('is ended three seconds after the limit, counted from its start; the best roster is kept', async () => {
     deafThread([{ kind: 'started' }, { kind: 'roster', solved: best }]);
-    const outcome = solveRoster(demoSizedProblem(), { limitSeconds: 10 });
+    const outcome = solveRoster(demoSizedProblem(), { limitSeconds: 10, lanes: 1 });
     await delivered();
     await vi.advanceTimersByTimeAsync(13_000);
     expect(await outcome).toEqual({ kind: 'out-of-time', ...best });
@@ -102,7 +106,7 @@ describe('a thread that overruns its time', () => {
 
   it('is a failure with a sentence when it had found nothing', async () => {
     deafThread([{ kind: 'started' }]);
-    const outcome = solveRoster(demoSizedProblem(), { limitSeconds: 10 });
+    const outcome = solveRoster(demoSizedProblem(), { limitSeconds: 10, lanes: 1 });
     await delivered();
     await vi.advanceTimersByTimeAsync(13_000);
     expect(await outcome).toEqual({
@@ -119,7 +123,7 @@ describe('a listener that throws', () => {
     const onRoster = () => {
       throw cause;
     };
-    const outcome = await solveRoster(demoSizedProblem(), { limitSeconds: 10, onRoster });
+    const outcome = await solveRoster(demoSizedProblem(), { limitSeconds: 10, lanes: 1, onRoster });
     expect(outcome).toMatchObject({ kind: 'failed', cause });
   });
 });
@@ -128,12 +132,34 @@ describe('a thread that breaks', () => {
   it('is a failure with a sentence for people and the cause for the log', async () => {
     const cause = new Error('worker exited');
     const run = () => Promise.reject(cause);
-    vi.mocked(solverPool).mockReturnValue({ run } as never);
-    expect(await solveRoster(demoSizedProblem(), { limitSeconds: 10 })).toEqual({
+    vi.mocked(solverPool).mockResolvedValue({ run } as never);
+    expect(await solveRoster(demoSizedProblem(), { limitSeconds: 10, lanes: 1 })).toEqual({
       kind: 'failed',
       message:
         'The solver broke off; run again, and with fewer people or days if it happens again.',
       cause,
     });
+  });
+
+  it('leaves the run to the other thread, whose answer counts', async () => {
+    const answer = { kind: 'optimal', ...best } as const;
+    const run = ({ job }: SolverTask) =>
+      job.kind === 'roster' && job.lane.number === 0
+        ? Promise.reject(new Error('worker exited'))
+        : Promise.resolve(answer);
+    vi.mocked(solverPool).mockResolvedValue({ run } as never);
+    const given = { limitSeconds: 10, lanes: 2 } as const;
+    expect(await solveRoster(demoSizedProblem(), given)).toEqual(answer);
+  });
+
+  it('does not matter to the run when it was only the one that searches along', async () => {
+    const answer = { kind: 'optimal', ...best } as const;
+    const run = ({ job }: SolverTask) =>
+      job.kind === 'roster' && job.lane.number === 1
+        ? Promise.reject(new Error('worker exited'))
+        : Promise.resolve(answer);
+    vi.mocked(solverPool).mockResolvedValue({ run } as never);
+    const given = { limitSeconds: 10, lanes: 2 } as const;
+    expect(await solveRoster(demoSizedProblem(), given)).toEqual(answer);
   });
 });

@@ -90,8 +90,8 @@ it('keeps the best roster, lawful and with honest figures, when it is stopped', 
 it('ends as failed when its thread dies, and the next run has a new one', async () => {
   const outcome = await solveRoster(demoSizedProblem(), {
     limitSeconds: 50,
-    onRoster: () => {
-      for (const thread of solverPool().threads) thread.terminate();
+    onRoster: async () => {
+      for (const thread of (await solverPool()).threads) thread.terminate();
     },
   });
   expect(outcome).toMatchObject({ kind: 'failed', cause: expect.any(Error) });
