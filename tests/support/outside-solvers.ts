@@ -52,6 +52,9 @@ export const solveWithGlpk: OutsideSolver = (text, format = 'lp') =>
     },
   );
 
+/** A program that turns in circles is ended after this. */
+const mostMilliseconds = 120_000;
+
 function inFolder<T>(
   text: string,
   format: ModelFormat,
@@ -65,8 +68,9 @@ function inFolder<T>(
     const result = join(folder, 'result.txt');
     writeFileSync(model, text);
     writeFileSync(result, '');
-    const run = spawnSync(program, argumentsOf(model, result), { encoding: 'utf8' });
-    if (run.error) throw new Error(`${program} could not be started`, { cause: run.error });
+    const options = { encoding: 'utf8', timeout: mostMilliseconds } as const;
+    const run = spawnSync(program, argumentsOf(model, result), options);
+    if (run.error) throw new Error(`${program} was not run to its end`, { cause: run.error });
     return read(readFileSync(result, 'utf8'), run.stdout);
   } finally {
     rmSync(folder, { recursive: true, force: true });

@@ -1,7 +1,7 @@
 import { type ColumnGenerationResult, generateColumns } from '../lines/column-generation';
 import type { Pattern } from '../lines/pattern-master';
 import type { Ground } from './first-roster';
-import type { Pace } from './pace';
+import { masterWork, type Pace } from './pace';
 import type { LinearTools } from './search-lane';
 import type { SearchState } from './search-state';
 
@@ -50,7 +50,7 @@ export function dive(
       mostRounds: left.size > fewPeople ? roundsAStep : roundsOfFew,
       limitSeconds: pace.isCounted ? Number.POSITIVE_INFINITY : pace.remaining(),
       shouldStop: () => state.isOver,
-      onIterations: (count) => pace.countSolve(left.size * 10, count),
+      onIterations: (count) => pace.countSolve(masterWork, count),
       onBound: () => undefined,
       isEnough: () => false,
     });

@@ -6,7 +6,7 @@ import type { Part } from '../lines/part';
 import { type Choice, chooseDays, choosePeople, freeColumns } from './choose-part';
 import { dive } from './dive';
 import { type Ground, linesOf, putRoster } from './first-roster';
-import type { Pace } from './pace';
+import { masterWork, type Pace } from './pace';
 import type { LinearTools } from './search-lane';
 import { searchPatterns } from './search-patterns';
 import type { SearchState } from './search-state';
@@ -149,7 +149,7 @@ export class Improvement {
       mostRounds: 40,
       limitSeconds: pace.isCounted ? Number.POSITIVE_INFINITY : Math.min(4, pace.remaining()),
       shouldStop: () => state.isOver || pace.elapsed() - startedAt > 4,
-      onIterations: (count) => pace.countSolve(part.people.length * 10, count),
+      onIterations: (count) => pace.countSolve(masterWork, count),
       onBound: () => undefined,
       isEnough: () => false,
     });

@@ -18,8 +18,8 @@ export interface Pace {
 
 /** Arcs looked at in a nominal second. */
 const arcsASecond = 60e6;
-/** Nonzeros x iterations of a linear solve in a nominal second. */
-const solverWorkASecond = 40e6;
+/** Nonzeros x iterations of a linear solve in a nominal second, by measurement of many. */
+const solverWorkASecond = 8e6;
 /** Every step counts for at least so many nominal seconds, or a search without people would never end. */
 const leastSeconds = 1e-4;
 
@@ -51,3 +51,6 @@ export function paceByWork(budgetSeconds: number): Pace {
     },
   };
 }
+
+/** Nonzeros that stand for an iteration on a master over patterns, whose columns come and go. */
+export const masterWork = 2000;

@@ -5,6 +5,7 @@ import { wholeOf } from '../lines/part';
 import { dive } from './dive';
 import { type Ground, linesOf, putRoster } from './first-roster';
 import { levelCents } from './level-cents';
+import { masterWork } from './pace';
 import { contradiction, keepLevels, type LevelProof } from './prove-levels';
 import type { LinearTools } from './search-lane';
 import { searchPatterns } from './search-patterns';
@@ -52,7 +53,7 @@ export function boundByPatterns(proof: CostProof, shareOfRest: number): void {
       if (!pace.isCounted) state.fetchFromPeer();
       return state.isOver || pace.elapsed() - startedAt > share;
     },
-    onIterations: (count) => pace.countSolve(ground.space.columns.rows.length / 50, count),
+    onIterations: (count) => pace.countSolve(masterWork, count),
     onBound: (bound, prices) => {
       const most = state.best?.levels ?? [];
       state.raiseCostBound(
@@ -94,7 +95,7 @@ export function searchTree(proof: CostProof, share: number): string | null {
       if (!pace.isCounted) state.fetchFromPeer();
       return state.isOver;
     },
-    onIterations: (count) => pace.countSolve(linear.indices.length / 50, count),
+    onIterations: (count) => pace.countSolve(linear.indices.length / 5, count),
   });
   if ('bound' in outcome) state.raiseCostBound(outcome.bound, best.levels);
   if ('solution' in outcome && outcome.solution) state.offer(outcome.solution.values);

@@ -55,7 +55,7 @@ function boundLevel(proof: LevelProof, linear: LinearModel, level: number): stri
   const outcome = solve(relaxed(linear), ground.model.levels[level]?.objective ?? '', {
     limitSeconds: pace.isCounted ? Number.POSITIVE_INFINITY : pace.remaining(),
     shouldStop: () => state.isOver,
-    onIterations: (count) => pace.countSolve(linear.indices.length / 50, count),
+    onIterations: (count) => pace.countSolve(linear.indices.length / 5, count),
   });
   if (outcome.kind === 'optimal') state.raiseLevelBound(level, outcome.bound);
   return contradiction(outcome);
@@ -77,7 +77,7 @@ function searchLevel(proof: LevelProof, linear: LinearModel, level: number): str
       if (!pace.isCounted) state.fetchFromPeer();
       return state.isOver || state.isProven(level);
     },
-    onIterations: (count) => pace.countSolve(linear.indices.length / 50, count),
+    onIterations: (count) => pace.countSolve(linear.indices.length / 5, count),
   });
   if ('solution' in outcome && outcome.solution) state.offer(outcome.solution.values);
   if ('bound' in outcome) {

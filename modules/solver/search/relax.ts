@@ -35,7 +35,7 @@ export function relaxCompact(
       : Math.min(mostSeconds, pace.remaining() * mostShare),
     iterationLimit: mostIterations,
     shouldStop: () => state.isOver,
-    onIterations: (count) => pace.countSolve(linear.indices.length / 50, count),
+    onIterations: (count) => pace.countSolve(linear.indices.length / 5, count),
   });
   if (outcome.kind !== 'optimal' || !outcome.duals) return null;
   const prices = readCompactPrices(ground, outcome.duals.rowDuals);

@@ -45,7 +45,7 @@ export function searchPatterns(
     },
     onSolution: (values) => state.offerCells(cellsOf(ground, values, patterns, first)),
     shouldStop: () => state.isOver,
-    onIterations: (count) => pace.countSolve(linear.indices.length / 50, count),
+    onIterations: (count) => pace.countSolve(linear.indices.length / 5, count),
   });
   if ('solution' in outcome && outcome.solution) {
     state.offerCells(cellsOf(ground, outcome.solution.values, patterns, first));
