@@ -56,7 +56,10 @@ export async function solveRoster(
       }
     },
   });
-  return end.kind === 'killed' ? keepBest(best.solved, end.wasStopped) : settle(end);
+  if (end.kind === 'killed') return keepBest(best.solved, end.wasStopped);
+  const outcome = settle(end);
+  // When the other lane tells of its last rosters is a matter of the clock: a repetition leaves them out.
+  return workSeconds === null ? best.complete(outcome) : outcome;
 }
 
 function keepBest(best: SolvedRoster | null, wasStopped: boolean): RosterOutcome {
