@@ -7,7 +7,7 @@ export interface RosterProgress {
   readonly elapsedMs: number;
   /** Missing person-minutes on firm floors in the best roster so far. */
   readonly shortageMinutes: number | null;
-  /** No roster is short of less than this. */
+  /** No roster that keeps the levels before the floors as well is short of less than this. */
   readonly shortageBoundMinutes: number | null;
   readonly bestCostCents: number | null;
   /** No roster as well covered as the best one costs less than this. */

@@ -45,7 +45,8 @@ export async function solveRoster(
   const end = await runLanes({
     problem,
     options: { limitSeconds, workSeconds, targetGap, seed, start },
-    lanes: options.lanes ?? (env().SOLVER_THREADS > 1 ? 2 : 1),
+    // A second lane that waits for a thread would hold up the first.
+    lanes: env().SOLVER_THREADS > 1 ? (options.lanes ?? 2) : 1,
     stop: options.stop,
     onMessage: (message, lane) => {
       if (message.kind === 'roster' && best.take(message.solved)) {

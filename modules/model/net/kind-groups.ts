@@ -66,9 +66,12 @@ function readKind(problem: Problem, person: ProblemPerson, kindId: string): Kind
   for (const shift of problem.shifts) {
     if (shift.kindId === kindId) byDay[shift.dayIndex] = shift;
   }
-  const limit = person.kindLimits.findIndex(
-    (one) => one.kindId === kindId && one.most < problem.days.length,
-  );
+  // Of several limits on one kind the tightest says it all.
+  const limits = person.kindLimits
+    .map((one, position) => ({ ...one, position }))
+    .filter((one) => one.kindId === kindId && one.most < problem.days.length)
+    .sort((one, other) => one.most - other.most);
+  const limit = limits[0]?.position ?? -1;
   return { kindId, byDay, limit };
 }
 

@@ -12,12 +12,13 @@ export interface NetRules {
   readonly groups: KindGroups;
   /** 0 is Monday, by day. */
   readonly weekdays: Uint8Array;
-  /**
-   * Follow classes: class 0 hinders nothing; class 1 + (age - 1) x (groupCount - 1) + (group - 1) says
-   * that the last shift was of that group, `age` days ago.
-   */
+  /** Days after a shift on which its rest can still stand in the way of another. */
   readonly reachDays: number;
-  /** Whether a group may start on a day in a follow class: by (class x days + day) x groups + group. */
+  /**
+   * Whether a group may start on a day in a follow class: by (class x days + day) x groups + group. Class 0
+   * hinders nothing; class 1 + (age - 1) x (groupCount - 1) + (group - 1) says that the last shift was of
+   * that group, `age` days ago.
+   */
   readonly isAllowed: Uint8Array;
   /** Longest and shortest run of days with a shift; Infinity and 1 without a limit. */
   readonly longestRun: number;
@@ -39,8 +40,6 @@ export interface NetRules {
   readonly nightsBefore: number;
   readonly runAfter: number;
   readonly nightsAfter: number;
-  /** Whether a follow class at the end of the period keeps the rest to the shifts after it. */
-  readonly mayEnd: Uint8Array;
   /** A run of days, and of Nights, is counted up to where one more makes no difference. */
   readonly runCap: number;
   readonly nightCap: number;
@@ -87,7 +86,6 @@ export function compileRules(
     leastMinutes: person.minimumMinutes - person.creditMinutes,
     mostMinutes: person.maximumMinutes - person.creditMinutes,
     ...runs,
-    mayEnd: endTable(problem, person, groups, reachDays),
     runCap: Number.isFinite(longestRun) ? Math.max(longestRun, runs.runBefore) : shortestRun,
     nightCap: Number.isFinite(longestNights) ? Math.max(longestNights, runs.nightsBefore) : 0,
   };
@@ -121,24 +119,6 @@ function allowTable(
         }
       }
     }
-  }
-  return table;
-}
-
-function endTable(
-  problem: Problem,
-  person: ProblemPerson,
-  groups: KindGroups,
-  reachDays: number,
-): Uint8Array {
-  const { groupCount } = groups;
-  const { restMinutes } = rulesOf(problem, person);
-  const nextStart = person.following[0]?.startMinute ?? Number.POSITIVE_INFINITY;
-  const table = new Uint8Array(1 + reachDays * (groupCount - 1)).fill(1);
-  for (let follow = 1; follow < table.length; follow += 1) {
-    const age = 1 + Math.floor((follow - 1) / (groupCount - 1));
-    const shift = groups.shiftOn(1 + ((follow - 1) % (groupCount - 1)), problem.days.length - age);
-    if (shift && shift.endMinute + restMinutes > nextStart) table[follow] = 0;
   }
   return table;
 }

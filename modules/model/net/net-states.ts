@@ -71,14 +71,15 @@ export function stepState(
   return stepShift(rules, next, day, chosen);
 }
 
-/** Whether a line may end so: hours, rest and runs into the shifts that follow the period. */
+/**
+ * Whether a line may end so: hours, and runs into the shifts that follow the period. A shift that leaves too
+ * little rest before them is no option of the person at all.
+ */
 export function mayEnd(rules: NetRules, states: Int32Array, at: number): boolean {
   const worked = (states[at + minutes] as number) * rules.minuteUnit;
-  const follow = followClass(rules, states[at + group] as number, states[at + age] as number);
   return (
     worked >= rules.leastMinutes &&
     worked <= rules.mostMinutes &&
-    rules.mayEnd[follow] === 1 &&
     mayJoin(states[at + run] as number, rules.runAfter, rules.longestRun) &&
     mayJoin(states[at + nightRun] as number, rules.nightsAfter, rules.longestNights)
   );

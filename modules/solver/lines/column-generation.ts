@@ -36,7 +36,6 @@ export interface ColumnGenerationResult {
   /** Duals of the last master, by its rows. */
   readonly rowDuals: Float64Array | null;
   readonly isConverged: boolean;
-  readonly rounds: number;
 }
 
 /** Patterns of each person that a round may add. */
@@ -114,7 +113,6 @@ export function generateColumns(
     values,
     rowDuals,
     isConverged,
-    rounds: round,
   };
 }
 

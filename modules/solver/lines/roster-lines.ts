@@ -97,6 +97,7 @@ export class RosterLines {
     for (let day = fromDay; day < this.days; day += 1) {
       const column = this.cells[person * this.days + day] as number;
       const group = column < 0 ? 0 : (this.space.columns.group[column] as number);
+      if (group < 0 || (column < 0 && lines.mayBeFree[day] === 0)) return false;
       const target = next[(this.nodes[base + day] as number) * groupCount + group];
       if (target === undefined || target < 0) return false;
       this.nodes[base + day + 1] = target;

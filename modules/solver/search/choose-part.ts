@@ -29,7 +29,6 @@ const partDays = 0.4;
  */
 export function choosePeople(
   { model, space }: Ground,
-  _values: Float64Array,
   size: number,
   name: 'people' | 'part',
   random: () => number,

@@ -128,7 +128,10 @@ export class Improvement {
     arm.size = Math.min(longestAnneal, arm.size * 1.3);
   }
 
-  /** A part laid anew over whole patterns: column generation, then a search tree over what it found. */
+  /**
+   * A part laid anew over whole patterns: column generation, then a search tree over what it found, or a
+   * dive where the part has many people.
+   */
   #layPatterns(arm: Arm, name: 'line patterns' | 'window patterns'): void {
     const { ground, state, open, pace, random, pool } = this.#tools;
     if (!state.best || putRoster(ground, state.best.roster).length > 0) return;
@@ -136,7 +139,7 @@ export class Improvement {
     const days = isWindow ? chooseDays(ground, arm.size, 'days', random) : null;
     const people = isWindow
       ? ground.space.lines.keys()
-      : choosePeople(ground, state.best.values, arm.size, 'people', random);
+      : choosePeople(ground, arm.size, 'people', random);
     const part: Part = {
       people: [...people],
       from: days?.from ?? 0,
@@ -174,7 +177,7 @@ export class Improvement {
     const best = state.best;
     if (!best) return;
     const choice: Choice = {
-      people: name === 'days' ? null : choosePeople(ground, best.values, arm.size, name, random),
+      people: name === 'days' ? null : choosePeople(ground, arm.size, name, random),
       days: name === 'people' ? null : chooseDays(ground, arm.size, name, random),
     };
     const part = restrictModel(ground.model.linear, best.values, freeColumns(ground.model, choice));

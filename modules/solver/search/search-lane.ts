@@ -35,8 +35,9 @@ export interface LinearTools {
 }
 
 /**
- * Lane 0 finds a first roster, relaxes, proves and, when that is done or too hard, improves. Lane 1 only
- * searches for better rosters. A run on one thread has lane 0 alone.
+ * Lane 0 finds a first roster, relaxes, proves and, when that is done or too hard, improves. Lane 1
+ * searches for better rosters; where the relaxation is close it also tries a bound by patterns (`assist`).
+ * A run on one thread has lane 0 alone.
  */
 export interface Lane {
   readonly number: 0 | 1;
@@ -64,8 +65,22 @@ const columnShare = 0.35;
 const tryShare = 0.15;
 const treeShare = { alone: 0.35, accompanied: 0.6 };
 
-/** One lane of a search; blocks its thread until the end. */
+/** One lane of a search; blocks its thread until the end, and then leaves the other lane alone. */
 export function searchLane(
+  tools: LinearTools,
+  problem: Problem,
+  options: RosterOptions,
+  lane: Lane,
+  hooks: SearchHooks,
+): RosterOutcome {
+  try {
+    return search(tools, problem, options, lane, hooks);
+  } finally {
+    lane.peer.end();
+  }
+}
+
+function search(
   tools: LinearTools,
   problem: Problem,
   options: RosterOptions,
@@ -83,7 +98,7 @@ export function searchLane(
   const given = { targetGap: options.targetGap, startedAt };
   const state = new SearchState(ground, pace, lane.peer, hooks, given);
   const random = seededRandom(options.seed * 2 + lane.number);
-  const search: Search = {
+  const all: Search = {
     ...tools,
     ground,
     state,
@@ -93,11 +108,12 @@ export function searchLane(
     lane,
     pool: new LinePool(problem.people.length),
   };
-  const failure = runLane(search);
+  const failure = runLane(all);
   state.fetchFromPeer();
   state.report(true);
-  lane.peer.end();
-  return failure ?? conclude(state, options);
+  // A solver that breaks late leaves the best roster, unproven: it is lawful all the same.
+  const isLost = failure !== null && (failure.kind === 'impossible' || state.best === null);
+  return isLost ? failure : conclude(state, options);
 }
 
 function explainClashes(
@@ -147,7 +163,7 @@ function findFirst(search: Search): Failure | null {
     }
   }
   state.offerLines(ground);
-  annealFor(search, firstAnneal, 1);
+  annealFor(search, firstAnneal);
   return null;
 }
 
@@ -187,16 +203,12 @@ function assist(search: Search): void {
 function annealGuided(search: Search): void {
   search.state.fetchFromPeer();
   const { most, share } = isClose(search) ? shortAnneal : longAnneal;
-  annealFor(search, Math.min(most, search.pace.remaining() * share), 1);
+  annealFor(search, Math.min(most, search.pace.remaining() * share));
   search.state.fetchFromPeer();
 }
 
 /** Anneals the lines of the ground, from the best roster when there is one. */
-function annealFor(
-  { ground, state, pace, random, pool }: Search,
-  seconds: number,
-  heat: number,
-): void {
+function annealFor({ ground, state, pace, random, pool }: Search, seconds: number): void {
   if (state.best) putRoster(ground, state.best.roster);
   if (ground.lines.isIn.some((isIn) => isIn === 0)) return;
   const startedAt = pace.elapsed();
@@ -212,7 +224,7 @@ function annealFor(
       if (batches % batchesAPool === 0) pool.take(ground.lines);
       return state.isOver ? 1 : (pace.elapsed() - startedAt) / seconds;
     },
-    hotCents: hotCents * heat,
+    hotCents,
     coldCents,
     random,
     worth: state.worth,

@@ -21,14 +21,11 @@ const mostPatterns = 4000;
 /**
  * The best roster made of the generated patterns, by a search tree over the master that starts from the
  * roster in the ground's lines. A pattern whose reduced cost is above the gap between that roster and the
- * master's value (`gapCents`) is in no better roster and is left out.
+ * master's value is in no better roster and is left out.
  */
-export function searchPatterns(
-  search: PatternSearch,
-  found: ColumnGenerationResult,
-  gapCents = search.ground.lines.total - found.value,
-): void {
+export function searchPatterns(search: PatternSearch, found: ColumnGenerationResult): void {
   const { ground, state, solve, pace, seed, limitSeconds, nodeLimit } = search;
+  const gapCents = ground.lines.total - found.value;
   const duals = found.rowDuals;
   if (!duals) return;
   const patterns = usefulPatterns(ground, found, duals, gapCents);

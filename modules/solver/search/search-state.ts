@@ -126,8 +126,12 @@ export class SearchState {
 
   /** Cost and bound differ by nothing but the rounding of pay. */
   isOptimal({ costCents, boundCents }: SolvedRoster): boolean {
-    const rounding = this.#slackCents === 0 ? 0 : Math.ceil(2 * this.#slackCents) + 1;
-    return costCents - boundCents <= rounding;
+    return costCents - boundCents <= this.#roundingCents;
+  }
+
+  /** Cents between cost and bound that only the rounding of pay explains. */
+  get #roundingCents(): number {
+    return this.#slackCents === 0 ? 0 : Math.ceil(2 * this.#slackCents) + 1;
   }
 
   /** Takes a solution of the model when it is better than the best: levels first, then cost. */
@@ -205,19 +209,19 @@ export class SearchState {
   solved(): SolvedRoster | null {
     if (!this.#best) return null;
     const { roster, levels, shortageMinutes, costCents } = this.#best;
-    const boundCents = Math.min(
-      this.#holds(this.#costBound) ? this.#costBound.cents : Number.NEGATIVE_INFINITY,
-      costCents,
-    );
-    const bound = Math.max(boundCents, this.#wholeCents(leastCostCents(this.#ground.model)));
+    const found = this.#holds(this.#costBound) ? this.#costBound.cents : Number.NEGATIVE_INFINITY;
+    const bound = Math.max(found, this.#wholeCents(leastCostCents(this.#ground.model)));
+    // Rounding may lift a bound over the cost; more than that is a fault, which the judge must see.
+    const boundCents =
+      bound - costCents <= this.#roundingCents ? Math.min(bound, costCents) : bound;
     const recorded = this.#recorded && this.#holds(this.#recorded) ? this.#recorded : null;
     return {
       roster,
       shortageMinutes,
       shortageBoundMinutes: Math.min(this.#shortageBound, shortageMinutes),
       costCents,
-      boundCents: Math.min(bound, costCents),
-      gap: costCents === 0 ? 0 : (costCents - Math.min(bound, costCents)) / Math.abs(costCents),
+      boundCents,
+      gap: costCents === 0 ? 0 : (costCents - boundCents) / Math.abs(costCents),
       levels,
       boundRecord: recorded?.record ?? null,
       recordedBoundCents: recorded?.cents ?? null,
@@ -243,12 +247,21 @@ export class SearchState {
     const { model } = this.#ground;
     const figures = weighRoster(model, values);
     if (this.#best && !isBetter(figures, this.#best)) return false;
+    this.#dropLevelBounds(figures.levels);
     const roster = readRoster(model, values);
     this.#best = { ...figures, roster, values: completeValues(model, values) };
     const solved = this.solved();
     if (solved) this.#hooks.onRoster(solved);
     this.report();
     return true;
+  }
+
+  /** Bounds of levels after the first that gets better were proven for what the levels before had been. */
+  #dropLevelBounds(levels: readonly number[]): void {
+    const before = this.#best?.levels;
+    if (!before) return;
+    const better = levels.findIndex((value, index) => value < (before[index] ?? 0));
+    if (better >= 0) this.#levelBounds.fill(0, better + 1);
   }
 
   #raiseLevel(level: number, whole: number): boolean {
@@ -260,20 +273,15 @@ export class SearchState {
 
   /** A bound that holds for the best roster stands before one that does not. */
   #raiseCost(bound: CostBound): boolean {
-    const isFit = !this.#best || this.#holds(bound);
-    if (
-      isFit &&
-      bound.record &&
-      bound.cents > (this.#recorded?.cents ?? Number.NEGATIVE_INFINITY)
-    ) {
-      this.#recorded = bound;
-    }
-    if (!isFit || (this.#holds(this.#costBound) && bound.cents <= this.#costBound.cents)) {
-      return false;
-    }
-    this.#costBound = bound;
-    this.report();
-    return true;
+    if (this.#best && !this.#holds(bound)) return false;
+    const isCloser = (held: CostBound | null) =>
+      held === null || !this.#holds(held) || bound.cents > held.cents;
+    const isNewRecord = bound.record !== null && isCloser(this.#recorded);
+    const isNewBound = isCloser(this.#costBound);
+    if (isNewRecord) this.#recorded = bound;
+    if (isNewBound) this.#costBound = bound;
+    if (isNewBound) this.report();
+    return isNewRecord || isNewBound;
   }
 
   /** A bound for less shortage than the roster has says nothing about it. */

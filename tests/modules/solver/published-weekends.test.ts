@@ -130,26 +130,24 @@ describe('A of B weekends off, five days a week, at most six in a row', () => {
    * printed Sunday to Saturday; the first instance is in Pinedo, chapter 12, too.
    */
   it.each([
-    { needs: [1, 0, 3, 3, 3, 3, 2], off: 1, of: 3, bounds: [3, 3, 3], people: 3 },
-    { needs: [2, 3, 3, 3, 3, 3, 2], off: 1, of: 2, bounds: [4, 4, 3], people: 4 },
-    { needs: [3, 5, 5, 5, 5, 5, 3], off: 1, of: 2, bounds: [6, 7, 5], people: 7 },
-    { needs: [2, 4, 4, 4, 4, 4, 1], off: 2, of: 3, bounds: [6, 5, 4], people: 6 },
-  ])(
-    'needs $needs with $off of $of off take $people people',
-    ({ needs, off, of, bounds, people }) => {
-      const [sunday = 0, ...others] = needs;
-      const sum = needs.reduce((all, one) => all + one, 0);
-      const weekend = Math.max(sunday, needs[6] ?? 0);
-      expect(bounds).toEqual([
-        Math.ceil((of * weekend) / (of - off)),
-        Math.ceil(sum / 5),
-        Math.max(...needs),
-      ]);
-      expect(people).toBe(Math.max(...bounds));
-      const rules = { weekendsPerPeriod: of - off, longestRunDays: 6 };
-      expectSmallest(people, (count) =>
-        withFiveDaysAWeek(weeksOf(count, [...others, sunday], of, rules), 'Sunday'),
-      );
-    },
-  );
+    { week: '1 0 3 3 3 3 2', off: 1, of: 3, bounds: [3, 3, 3], people: 3 },
+    { week: '2 3 3 3 3 3 2', off: 1, of: 2, bounds: [4, 4, 3], people: 4 },
+    { week: '3 5 5 5 5 5 3', off: 1, of: 2, bounds: [6, 7, 5], people: 7 },
+    { week: '2 4 4 4 4 4 1', off: 2, of: 3, bounds: [6, 5, 4], people: 6 },
+  ])('$week with $off of $of off take $people people', ({ week, off, of, bounds, people }) => {
+    const needs = week.split(' ').map(Number);
+    const [sunday = 0, ...others] = needs;
+    const sum = needs.reduce((all, one) => all + one, 0);
+    const weekend = Math.max(sunday, needs[6] ?? 0);
+    expect(bounds).toEqual([
+      Math.ceil((of * weekend) / (of - off)),
+      Math.ceil(sum / 5),
+      Math.max(...needs),
+    ]);
+    expect(people).toBe(Math.max(...bounds));
+    const rules = { weekendsPerPeriod: of - off, longestRunDays: 6 };
+    expectSmallest(people, (count) =>
+      withFiveDaysAWeek(weeksOf(count, [...others, sunday], of, rules), 'Sunday'),
+    );
+  });
 });

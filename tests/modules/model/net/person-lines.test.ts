@@ -80,7 +80,7 @@ const night = (dayIndex: number) => ({
   isNight: true,
 });
 
-/** Problems of one person and four days; each has the number of lawful lines beside it, counted by hand. */
+/** Problems of one person and four days or a week; each has the number of lawful lines beside it, counted by hand. */
 const byHand: readonly (readonly [string, ProblemSketch, number])[] = [
   ['one kind and no rule', { kinds: houseKinds.slice(0, 1) }, 16],
   ['at most two in a row', { kinds: houseKinds.slice(0, 1), rules: { longestRunDays: 2 } }, 13],
@@ -110,6 +110,21 @@ const byHand: readonly (readonly [string, ProblemSketch, number])[] = [
       people: [{ following: [night(4), night(5)] }],
     },
     5,
+  ],
+  [
+    'one weekend of one, both of its days',
+    { kinds: houseKinds.slice(0, 1), rules: { weekendsPerPeriod: 1 }, dayCount: 7 },
+    128,
+  ],
+  [
+    'one weekend of two, from a Sunday to a Saturday',
+    {
+      startsOn: '2027-01-31',
+      dayCount: 7,
+      kinds: houseKinds.slice(0, 1),
+      rules: { weekendsPerPeriod: 1 },
+    },
+    96,
   ],
 ];
 

@@ -6,7 +6,11 @@ import { writeBoundRecord } from '@/modules/solver/lines/bound-record';
 import { generateColumns } from '@/modules/solver/lines/column-generation';
 import { costOf } from '@/modules/solver/lines/line-cost';
 import { wholeOf } from '@/modules/solver/lines/part';
-import { type Pattern, PatternMaster } from '@/modules/solver/lines/pattern-master';
+import {
+  type MasterPrices,
+  type Pattern,
+  PatternMaster,
+} from '@/modules/solver/lines/pattern-master';
 import { dayOff } from '@/modules/solver/lines/roster-lines';
 import { type Ground, linesOf } from '@/modules/solver/search/first-roster';
 import { levelCents } from '@/modules/solver/search/level-cents';
@@ -185,6 +189,7 @@ describe('column generation', () => {
           expect(bound).toBeLessThanOrEqual(ground.lines.total + roomFor(bound) * 100);
         annealFor(ground, 6, seed, compare);
         if (!prices) return;
+        expectWithinSlopes(ground, prices);
         const proven = proveBound(
           problem,
           writeBoundRecord(ground.space, prices),
@@ -192,11 +197,23 @@ describe('column generation', () => {
         );
         compareWithProof(ground, bound, proven);
       }),
-      { numRuns: 60 },
+      { numRuns: 120 },
     );
     expect(compared).toBeGreaterThan(20);
   });
 });
+
+/** One unit more is never worth more than it can take off the cost of a row, nor less than it can add. */
+function expectWithinSlopes({ space: { rows } }: Ground, prices: MasterPrices) {
+  prices.rows.forEach((price, row) => {
+    const from = rows.offsets[row] ?? 0;
+    const to = rows.offsets[row + 1] ?? rows.table.length;
+    const slope = (at: number) => (rows.table[at + 1] ?? 0) - (rows.table[at] ?? 0);
+    const room = roomFor(price) * 100;
+    expect(price).toBeLessThanOrEqual(-slope(from) + room);
+    expect(price).toBeGreaterThanOrEqual(-slope(to - 2) - room);
+  });
+}
 
 /** The engine's bound for the levels of the roster in the lines, and the proof's for the same figures. */
 function compareWithProof(ground: Ground, bound: number, proven: BoundProof) {
