@@ -111,6 +111,11 @@ describe('the bound at any prices', () => {
           expect(proven.sentence).toMatch(/^No roster can keep the rule /);
           return;
         }
+        // The proof drops limits whose product is larger; the search prices them, so it may prove more.
+        const isCounted = problem.people.every(
+          ({ kindLimits }) => kindLimits.reduce((all, { most }) => all * (most + 1), 1) <= 32,
+        );
+        if (!isCounted) return;
         compared += 1;
         const room = 2 * roundingSlackCents(ground.model) + 1 + roomFor(bound, ...prices.rows);
         expect(proven.boundCents).toBeGreaterThanOrEqual(Math.max(0, bound) - room);
